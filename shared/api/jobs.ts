@@ -1,0 +1,166 @@
+/** Jobs, packs, entries, devices and keys. */
+import { z } from 'zod';
+import type { Checklist } from '../checklist/types';
+import type { Finding } from '../rules/finding';
+import type { LockPlan, StillLive, Wait } from '../isolation/types';
+import type { Panel } from '../panel/panelSchema';
+import { entryEnvelope } from '../job/entry';
+import { tag, text } from '../panel/units';
+import { digest, id, instant } from './common';
+import type { Language } from './common';
+import type { SiteSettings } from './sites';
+import { acceptance } from './panels';
+
+export const jobRequest = z.strictObject({
+  id,
+  panel: id,
+  revision: z.int().positive(),
+  points: z.array(tag).min(1),
+  electricians: z.array(id).min(1),
+  foreman: id,
+  due: z.iso.date(),
+  words: text(1000).optional(),
+  acceptances: z.array(acceptance),
+});
+export type JobRequest = z.infer<typeof jobRequest>;
+/** What a job on these points would be, computed while choosing: plan, findings in scope, whether it can start. */
+export const jobPreviewRequest = z.strictObject({
+  panel: id,
+  revision: z.int().positive(),
+  points: z.array(tag),
+});
+export const cancelRequest = z.strictObject({ words: text(500) });
+
+export const jobStatus = z.enum([
+  'planned',
+  'sent',
+  'accepted',
+  'running',
+  'signed',
+  'returned',
+  'countersigned',
+  'sealed',
+  'cancelled',
+]);
+const personName = z.object({ id, name: z.string() });
+export const jobRow = z.object({
+  id,
+  number: z.string(),
+  site: id,
+  panel: id,
+  panelTag: z.string(),
+  panelName: z.string(),
+  revision: z.int(),
+  status: jobStatus,
+  points: z.int(),
+  of: z.int(),
+  due: z.iso.date(),
+  isolators: z.array(z.string()),
+  electricians: z.array(personName),
+  foreman: personName,
+  /** Progress as the server has heard it. */
+  stage: z.string().nullable(),
+  stageDone: z.int(),
+  stageOf: z.int(),
+  stagesDone: z.int(),
+  locks: z.array(z.object({ isolator: z.string(), lock: z.string(), person: z.string() })),
+  lastHeard: instant.nullable(),
+  /** Why it waits for the foreman, with the number each. */
+  waiting: z.array(
+    z.object({
+      what: z.enum(['countersign', 'hold', 'two-answers', 'drawing-differs', 'contradiction', 'late']),
+      count: z.int(),
+      since: instant,
+    }),
+  ),
+  newerRevision: z.boolean(),
+  record: id.nullable(),
+});
+export type JobRow = z.infer<typeof jobRow>;
+
+export interface PackPerson {
+  id: string;
+  name: string;
+  part: 'electrician' | 'foreman';
+  /** Public keys known when the pack was made; later ones come with the entries. */
+  keys: { key: string; publicKey: JsonWebKey }[];
+}
+/** Everything a phone needs to do the job with no signal. `digest` is SHA-256 of the canonical JSON of the rest. */
+export interface Pack {
+  format: 'coldloop-pack/1';
+  digest: string;
+  job: {
+    id: string;
+    number: string;
+    due: string;
+    words?: string;
+    site: { id: string; name: string; settings: SiteSettings };
+  };
+  panel: Panel;
+  revision: number;
+  checklist: Checklist;
+  plan: LockPlan;
+  stillLive: StillLive[];
+  waits: Wait[];
+  findings: { finding: Finding; accepted?: { reason: string; by: string } }[];
+  people: PackPerson[];
+  /** The message templates its texts use, per language, as they were at issue. */
+  wording: Record<Language, Record<string, string>>;
+}
+
+export const entriesRequest = z.strictObject({
+  /** log → key that signs it; the log's id is uuidv5(job, key). */
+  logs: z.record(z.string(), id),
+  entries: z.array(entryEnvelope).min(1).max(500),
+});
+export const acknowledgement = z.object({
+  id,
+  order: z.int().nullable(),
+  setAside: z.boolean(),
+});
+export const entriesAnswer = z.object({ acknowledged: z.array(acknowledgement) });
+export const logView = z.object({
+  log: id,
+  key: id,
+  person: id,
+  publicKey: z.record(z.string(), z.unknown()),
+});
+export const entriesPage = z.object({
+  entries: z.array(entryEnvelope.extend({ order: z.int(), receivedAt: instant })),
+  logs: z.array(logView),
+  /** Cursor to give as `after` next time; equal to the one given when nothing is new. */
+  after: z.int(),
+  more: z.boolean(),
+  status: jobStatus,
+});
+export type EntriesPage = z.infer<typeof entriesPage>;
+
+export const deviceRequest = z.strictObject({ id, name: text(120) });
+export const keyRequest = z.strictObject({
+  id,
+  device: id,
+  publicKey: z.strictObject({
+    kty: z.literal('EC'),
+    crv: z.literal('P-256'),
+    x: z.string().max(60),
+    y: z.string().max(60),
+  }),
+});
+export const deviceView = z.object({
+  id,
+  name: z.string(),
+  registeredAt: instant,
+  revokedAt: instant.nullable(),
+  people: z.array(personName),
+  lastHeard: instant.nullable(),
+});
+export type DeviceView = z.infer<typeof deviceView>;
+export const packList = z.object({
+  /** Packs this device does not have yet. */
+  packs: z.array(z.unknown()),
+  current: z.array(z.object({ job: id, digest, status: jobStatus })),
+});
+export interface PackList {
+  packs: Pack[];
+  current: { job: string; digest: string; status: z.infer<typeof jobStatus> }[];
+}

@@ -1,0 +1,28 @@
+/** Every sentence a person reads, in Spanish, gathered from one file an area. */
+import { findings } from './es/findings';
+import { isolation } from './es/isolation';
+import { checklist } from './es/checklist';
+import { job } from './es/job';
+import { diagram } from './es/diagram';
+import { app } from './es/app';
+import { field } from './es/field';
+import { device } from './es/device';
+import { office } from './es/office';
+import { records } from './es/records';
+import { mail } from './es/mail';
+import { problems } from './es/problems';
+
+export const es = {
+  ...findings,
+  ...isolation,
+  ...checklist,
+  ...job,
+  ...diagram,
+  ...app,
+  ...field,
+  ...device,
+  ...office,
+  ...records,
+  ...mail,
+  ...problems,
+} as const satisfies Record<keyof typeof import('./en').en, string>;

@@ -1,0 +1,1 @@
+export const isolation = {} as const;

@@ -1,0 +1,1 @@
+export const job = {} as const;
