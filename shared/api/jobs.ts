@@ -6,10 +6,10 @@ import type { LockPlan, StillLive, Wait } from '../isolation/types';
 import type { Panel } from '../panel/panelSchema';
 import { entryEnvelope } from '../job/entry';
 import { tag, text } from '../panel/units';
-import { digest, id, instant } from './common';
+import { digest, id, instant, page, pageQuery } from './common';
 import type { Language } from './common';
 import type { SiteSettings } from './sites';
-import { acceptance } from './panels';
+import { acceptance, panelCheck, placedFinding } from './panels';
 
 export const jobRequest = z.strictObject({
   id,
@@ -29,6 +29,42 @@ export const jobPreviewRequest = z.strictObject({
   revision: z.int().positive(),
   points: z.array(tag),
 });
+export const jobPreview = z.object({
+  /** Nothing blocks and nothing is left to accept. */
+  canStart: z.boolean(),
+  /** What no acceptance lifts: no points, no lock plan, a finding that hurts. */
+  blocked: z.array(
+    z.object({ code: z.enum(['no-points', 'unknown-point', 'no-plan', 'hurts']), says: z.string() }),
+  ),
+  points: z.int(),
+  of: z.int(),
+  plan: z
+    .object({
+      isolators: z.array(
+        z.object({
+          tag: z.string(),
+          location: z.string(),
+          lock: z.enum(['hasp', 'device-needed', 'cannot-lock']),
+          lockDevice: z.string().nullable(),
+          tell: z.array(z.string()),
+          afterDoor: z.boolean(),
+          currentMustBeZero: z.boolean(),
+          extraMeasure: z.boolean(),
+        }),
+      ),
+      weight: z.number(),
+      guarded: z.array(z.object({ supply: z.string(), reason: z.string(), guard: z.string() })),
+      otherEnergy: z.array(z.string()),
+      proven: z.boolean(),
+    })
+    .nullable(),
+  stillLive: panelCheck.shape.isolation.shape.stillLive,
+  waits: panelCheck.shape.isolation.shape.waits,
+  /** Findings in the scope; `needsAcceptance` until the revision or the job accepts them. */
+  findings: z.array(placedFinding.extend({ needsAcceptance: z.boolean() })),
+  checklist: panelCheck.shape.checklist,
+});
+export type JobPreview = z.infer<typeof jobPreview>;
 export const cancelRequest = z.strictObject({ words: text(500) });
 
 export const jobStatus = z.enum([
@@ -77,6 +113,24 @@ export const jobRow = z.object({
   record: id.nullable(),
 });
 export type JobRow = z.infer<typeof jobRow>;
+export const jobQuery = pageQuery.extend({
+  site: id.optional(),
+  panel: id.optional(),
+  status: jobStatus.optional(),
+  /** `me`: only jobs that wait for the foreman who asks. */
+  waiting: z.literal('me').optional(),
+});
+export const jobsPage = page(jobRow);
+export const jobView = jobRow.extend({
+  scope: z.array(z.string()),
+  words: z.string().nullable(),
+  acceptances: z.array(acceptance.extend({ by: z.string() })),
+  /** Digest of the pack that was sent, or null while planned. */
+  pack: digest.nullable(),
+  sentAt: instant.nullable(),
+  cancelled: z.object({ at: instant, by: z.string(), words: z.string() }).nullable(),
+});
+export type JobView = z.infer<typeof jobView>;
 
 export interface PackPerson {
   id: string;
@@ -119,6 +173,12 @@ export const acknowledgement = z.object({
   setAside: z.boolean(),
 });
 export const entriesAnswer = z.object({ acknowledged: z.array(acknowledgement) });
+/** 409 of a push: an entry's `previous` is not held. `heads` is the highest seq held of each log of the request (0: none). */
+export const headsProblem = problem.extend({
+  code: z.literal('heads'),
+  heads: z.record(z.string(), z.int().nonnegative()),
+});
+export type HeadsProblem = z.infer<typeof headsProblem>;
 export const logView = z.object({
   log: id,
   key: id,

@@ -2,7 +2,7 @@
 import { z } from 'zod';
 import { panelSchema } from '../panel/panelSchema';
 import { tag, text } from '../panel/units';
-import { digest, id, instant } from './common';
+import { digest, id, instant, page, pageQuery } from './common';
 
 export const panelUpload = z.strictObject({ id, site: id, panel: panelSchema });
 export const draftSave = z.strictObject({ version: z.int(), panel: panelSchema });
@@ -42,6 +42,8 @@ export const panelView = panelRow.extend({
   revisions: z.array(revisionRow),
 });
 export type PanelView = z.infer<typeof panelView>;
+export const panelQuery = pageQuery.extend({ site: id.optional() });
+export const panelsPage = page(panelRow);
 
 const quantity = z.object({ name: z.string(), value: z.number(), unit: z.string(), basis: z.string() });
 const where = z.object({
@@ -64,6 +66,23 @@ export const findingView = z.object({
     .nullable(),
 });
 export type FindingView = z.infer<typeof findingView>;
+
+/** Findings of a draft or a revision. `place` is what an acceptance names. */
+export const placedFinding = findingView.extend({
+  place: z.string(),
+  accepted: z.object({ reason: z.string(), by: z.string() }).nullable(),
+});
+export const findingsAnswer = z.object({
+  ruleSet: z.string(),
+  checks: z.int(),
+  couldNotRun: z.array(z.object({ rule: z.string(), where, missing: z.string() })),
+  findings: z.array(placedFinding),
+  /** Why it cannot be issued yet; empty for a revision. */
+  problems: z.array(z.object({ path: z.string(), says: z.string() })),
+});
+export type FindingsAnswer = z.infer<typeof findingsAnswer>;
+export const revisionView = revisionRow.extend({ panel: panelSchema });
+export type RevisionView = z.infer<typeof revisionView>;
 
 export const panelCheckRequest = z.strictObject({
   panel: panelSchema,
