@@ -6,7 +6,7 @@ import type { LockPlan, StillLive, Wait } from '../isolation/types';
 import type { Panel } from '../panel/panelSchema';
 import { entryEnvelope } from '../job/entry';
 import { tag, text } from '../panel/units';
-import { digest, id, instant, page, pageQuery } from './common';
+import { digest, id, instant, page, pageQuery, problem } from './common';
 import type { Language } from './common';
 import type { SiteSettings } from './sites';
 import { acceptance, panelCheck, placedFinding } from './panels';
