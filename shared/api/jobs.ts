@@ -62,6 +62,9 @@ export const jobPreview = z.object({
   waits: panelCheck.shape.isolation.shape.waits,
   /** Findings in the scope; `needsAcceptance` until the revision or the job accepts them. */
   findings: z.array(placedFinding.extend({ needsAcceptance: z.boolean() })),
+  /** How many checks ran in the scope, and those that could not: "no findings" is never shown without them. */
+  checks: z.int(),
+  couldNotRun: panelCheck.shape.couldNotRun,
   checklist: panelCheck.shape.checklist,
 });
 export type JobPreview = z.infer<typeof jobPreview>;
