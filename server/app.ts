@@ -1,0 +1,45 @@
+/** The ordered list of middleware and routes, nothing else. */
+import compression from 'compression';
+import express, { type Express } from 'express';
+import { devMailRoutes } from './features/mail/devMail';
+import { healthRoutes } from './features/health/routes';
+import { peopleRoutes } from './features/people/routes';
+import { sessionRoutes } from './features/sessions/routes';
+import { sitesRoutes } from './features/sites/routes';
+import { clientShell, staticClient } from './http/client';
+import { crossSite } from './http/crossSite';
+import { errorHandler } from './http/errorHandler';
+import { noStore } from './http/noStore';
+import { notFound } from './http/refused';
+import { securityHeaders } from './http/securityHeaders';
+import type { Services } from './services';
+
+/** Ordinary requests are small; panel uploads and entries read their bodies with limits of their own. */
+const ordinaryBody = '256kb';
+
+export function createApp(services: Services): Express {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', services.config.trustProxy);
+  app.use(securityHeaders);
+  app.use(compression());
+  app.use('/api', noStore);
+  app.use('/api', healthRoutes(services.database));
+  app.use(staticClient());
+  app.use('/api', services.session.handlers);
+  app.use('/api', crossSite);
+  app.use('/api', express.json({ limit: ordinaryBody, strict: true }));
+  app.use('/api', sessionRoutes(services.database, services.session.passport, services.sessions));
+  app.use('/api', peopleRoutes(services.people));
+  app.use('/api', sitesRoutes(services.sites));
+  app.use('/api', () => {
+    throw notFound();
+  });
+  if (services.config.devMailFolder !== null) app.use(devMailRoutes(services.config.devMailFolder));
+  app.use(clientShell);
+  app.use(() => {
+    throw notFound();
+  });
+  app.use(errorHandler(services.log));
+  return app;
+}
