@@ -1,0 +1,36 @@
+/** The few shapes of answers that many families share. */
+import { say, type Text } from '../panel/says';
+import type { Ask, ReadingAsk } from './types';
+
+export const done = (key = 'checklist.answer.done'): Ask => ({ kind: 'done', label: say(key) });
+
+/** A choice of one good answer and the bad ones; `keys` are wording keys under `checklist.choice`. */
+export function choice(good: readonly string[], bad: readonly string[], params?: Text['params']): Ask {
+  const option = (ok: boolean) => (value: string) => ({
+    value,
+    label: say(`checklist.choice.${value}`, params),
+    ok,
+  });
+  return { kind: 'choice', options: [...good.map(option(true)), ...bad.map(option(false))] };
+}
+
+/** Names and numbers a person writes: long enough for a sentence. */
+export const written: Ask = { kind: 'text', maxLength: 300 };
+
+/**
+ * A dead test in volts, read as AC or as DC.
+ * Its limit holds on both sides of zero: a meter with swapped probes shows −24 V, and that is not dead.
+ */
+export function deadReading(
+  function_: 'AC' | 'DC',
+  limitV: number,
+  dead: NonNullable<ReadingAsk['dead']>,
+): ReadingAsk {
+  return {
+    kind: 'reading',
+    unit: `V ${function_}`,
+    low: function_ === 'DC' ? -limitV : 0,
+    high: limitV,
+    dead,
+  };
+}

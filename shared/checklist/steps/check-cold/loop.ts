@@ -1,0 +1,91 @@
+/** The finished loop, still dead: through, not to earth, not to its neighbour, the right way round. */
+import type { Point } from '../../../panel/panelSchema';
+import { say } from '../../../panel/says';
+import { choice } from '../../asks';
+import type { Facts, PointFacts } from '../../facts';
+import { loopOhms } from '../../loopOhms';
+import { makeStep } from '../../makeStep';
+import type { ReadingAsk, Step } from '../../types';
+import { isElectronic } from './electronic';
+
+const common = ({ address, terminal }: Point) =>
+  ({ stage: 'check-cold', family: 'loop', where: { point: address, terminal } }) as const;
+
+/** Limits only where the cable gives them: no cable, no invented number. */
+function continuityAsk(point: Point): ReadingAsk {
+  const expected = point.cable && loopOhms(point.cable);
+  if (!point.cable || !expected) return { kind: 'reading', unit: 'ohm', low: 0 };
+  return {
+    kind: 'reading',
+    unit: 'ohm',
+    low: expected.low,
+    high: expected.high,
+    why: say('checklist.why.loop', {
+      m: point.cable.lengthM,
+      perKm: expected.ohmPerKm,
+      ohm: expected.ohm,
+    }),
+  };
+}
+
+function continuity(point: Point): Step[] {
+  const devices = [point.device, ...(point.series ?? []), ...(point.parallel ?? [])];
+  if (devices.some(isElectronic)) return [];
+  return [
+    makeStep({
+      ...common(point),
+      id: `cold.${point.address}.loop`,
+      title: say('checklist.cold.loop', { terminal: point.terminal }),
+      detail: [say('checklist.cold.loop.zero'), say('checklist.cold.loop.short')],
+      ask: continuityAsk(point),
+      picture: { kind: 'loop', point: point.address },
+    }),
+    makeStep({
+      ...common(point),
+      id: `cold.${point.address}.loop.open`,
+      title: say('checklist.cold.loop.open', { terminal: point.terminal }),
+      ask: choice(['short-off'], ['short-on']),
+    }),
+  ];
+}
+
+/** Terminals that stand beside this one among the module's points; what is landed on them may touch it. */
+function neighboursOf({ panel }: Facts, { point, module, group }: PointFacts): string[] {
+  if (module.terminals) {
+    const at = module.terminals.indexOf(point.terminal);
+    if (at >= 0)
+      return [module.terminals[at - 1], module.terminals[at + 1]].filter((each) => each !== undefined);
+  }
+  const others = panel.points.filter((each) => each.group === group.tag && each.terminal !== point.terminal);
+  return others.length > 0 ? [group.terminal] : [];
+}
+
+export function loop(facts: Facts, worked: PointFacts): Step[] {
+  const { point } = worked;
+  const { address, terminal } = point;
+  const neighbours = neighboursOf(facts, worked);
+  const beside = (neighbour: string) =>
+    makeStep({
+      ...common(point),
+      id: `cold.${address}.neighbour.${neighbour}`,
+      title: say('checklist.cold.neighbour', { terminal, neighbour }),
+      ask: choice(['no-connection'], ['connection']),
+    });
+  return [
+    ...continuity(point),
+    makeStep({
+      ...common(point),
+      id: `cold.${address}.earth`,
+      title: say('checklist.cold.earth', { terminal, earth: facts.panel.earthTerminal }),
+      ask: choice(['no-connection'], ['connection']),
+    }),
+    ...neighbours.map(beside),
+    makeStep({
+      ...common(point),
+      id: `cold.${address}.polarity`,
+      title: say('checklist.cold.polarity', { terminal }),
+      ask: choice(['ends-match'], ['ends-differ']),
+      picture: { kind: 'loop', point: address },
+    }),
+  ];
+}

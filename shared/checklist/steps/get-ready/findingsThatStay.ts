@@ -1,0 +1,20 @@
+/** What the checks found and somebody accepted, or only tells: each is read before the door is opened. */
+import { say } from '../../../panel/says';
+import { done } from '../../asks';
+import type { Facts } from '../../facts';
+import { findingKey, placeOf } from '../../findingsInScope';
+import { makeStep } from '../../makeStep';
+import type { Step } from '../../types';
+
+export const findingsThatStay = ({ stays }: Facts): Step[] =>
+  stays.map((finding) =>
+    makeStep({
+      id: `ready.stays.${findingKey(finding)}`,
+      stage: 'get-ready',
+      family: 'findings-that-stay',
+      title: say('checklist.ready.stays', { place: placeOf(finding.where) }),
+      detail: [finding.says, ...(finding.remedy ? [finding.remedy.says] : [])],
+      where: finding.where,
+      ask: done('checklist.answer.read'),
+    }),
+  );

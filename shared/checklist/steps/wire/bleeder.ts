@@ -1,0 +1,49 @@
+/** The resistor across an input that leads a sensor's leakage away: measured before it is fitted. */
+import { say } from '../../../panel/says';
+import { choice } from '../../asks';
+import type { Facts, PointFacts } from '../../facts';
+import { makeStep } from '../../makeStep';
+import type { Step } from '../../types';
+
+// E24 values are made to 5 % (IEC 60063).
+const tolerance = 0.05;
+
+/** The panel file's own resistor, else the one a finding's remedy asks for. */
+function resistorFor(facts: Facts, { point }: PointFacts): { ohm: number; W: number | string } | undefined {
+  if (point.bleeder) return point.bleeder;
+  const seed = facts.seeds('fit-bleeder').find(({ where }) => where.point === point.address);
+  const values = { ...seed?.finding.remedy?.values, ...seed?.params };
+  if (typeof values.ohm !== 'number') return undefined;
+  return { ohm: values.ohm, W: values.W ?? '?' };
+}
+
+export function bleeder(facts: Facts, worked: PointFacts): Step[] {
+  const resistor = resistorFor(facts, worked);
+  if (!resistor) return [];
+  const { address, terminal } = worked.point;
+  const { ohm, W } = resistor;
+  const common = { stage: 'wire', family: 'bleeder', where: { point: address, terminal } } as const;
+  return [
+    makeStep({
+      ...common,
+      id: `wire.${address}.bleeder.value`,
+      title: say('checklist.wire.bleeder.value', { terminal }),
+      detail: [say('checklist.wire.bleeder.watts', { ohm, W })],
+      ask: {
+        kind: 'reading',
+        unit: 'ohm',
+        low: ohm * (1 - tolerance),
+        high: ohm * (1 + tolerance),
+        why: say('checklist.why.bleeder', { ohm }),
+      },
+    }),
+    makeStep({
+      ...common,
+      id: `wire.${address}.bleeder`,
+      title: say('checklist.wire.bleeder', { ohm, terminal, common: worked.group.terminal }),
+      detail: [say('checklist.wire.bleeder.across')],
+      ask: choice(['bleeder-across-input'], ['bleeder-elsewhere']),
+      picture: { kind: 'loop', point: address },
+    }),
+  ];
+}
