@@ -1,0 +1,17 @@
+export const person = {
+  'field.who.sheet': 'Who is here?',
+  'field.who.title': 'Who are you?',
+  'field.who.nobody': 'Nobody is set up on this phone yet',
+  'field.who.add': 'Not on the list? You need the network once, to set your PIN.',
+  'field.who.setUp': 'Set up this phone for me',
+  'field.who.other': 'I am somebody else',
+  'field.who.leave': 'Hand the phone over',
+  'field.pin.yours': 'Your PIN',
+  'field.pin.open': 'Open',
+  'field.pin.go': 'Go on',
+  'field.pin.idle': 'Nobody touched this phone for 10 minutes. Is it still you?',
+  'field.pin.wrong': 'That PIN is wrong. Try again.',
+  'field.pin.wait': 'That PIN is wrong. Try again in {seconds} s.',
+  'field.part.electrician': 'electrician',
+  'field.part.foreman': 'foreman',
+} as const;

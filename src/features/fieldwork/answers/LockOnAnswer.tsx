@@ -1,0 +1,48 @@
+import { useState } from 'react';
+import { LineBox } from '../../../components/field/LineBox';
+import { oneLine } from '../../../components/field/oneLine';
+import { useWords } from '../../../components/words';
+import { locksOn } from '../job/ownLocks';
+import { useFieldJob } from '../job/useFieldJob';
+import { StepFrame } from '../step/StepFrame';
+import { useAnswer } from '../step/useAnswer';
+import { SaveButton } from './SaveButton';
+import type { StepOf } from './StepAnswer';
+
+/** One's own lock on an isolator: the number on the padlock, typed big. */
+export function LockOnAnswer({ step }: { step: StepOf<'lock-on'> }) {
+  const { t } = useWords();
+  const { state } = useFieldJob();
+  const { act, saving, failed } = useAnswer(step);
+  const [typed, setTyped] = useState('');
+  const lock = oneLine(typed);
+  const { isolator } = step.ask;
+  // One padlock cannot hang in two places: the number was misread, or it is another lock.
+  const elsewhere = locksOn(state).find((each) => each.lock === lock);
+  return (
+    <StepFrame
+      step={step}
+      failed={failed}
+      answer={
+        <LineBox
+          label={t('field.lockOn.number')}
+          value={typed}
+          inputMode="numeric"
+          maxLength={40}
+          onChange={setTyped}
+          className="text-[2.4rem]!"
+          error={elsewhere && t('field.lockOn.elsewhere', { lock, isolator: elsewhere.isolator })}
+        />
+      }
+      primary={
+        <SaveButton
+          saving={saving}
+          disabled={!lock || Boolean(elsewhere)}
+          onSave={() => act('lock-on', { isolator, lock, step: step.id })}
+        >
+          {lock ? t('field.lockOn.save', { lock, isolator }) : t('field.lockOn.type')}
+        </SaveButton>
+      }
+    />
+  );
+}

@@ -1,0 +1,41 @@
+import type { Step } from '../../../../shared/checklist/types';
+import { nextStep } from '../../../../shared/job/next';
+import type { Refusal } from '../../../../shared/job/types';
+import { paths } from '../../../app/paths';
+import { FieldLink } from '../../../components/field/FieldButton';
+import { MarkedText } from '../../../components/field/MarkedText';
+import { useWords } from '../../../components/words';
+import { useFieldJob } from '../job/useFieldJob';
+import { StepFrame } from '../step/StepFrame';
+
+/** This step's gate is shut for this person: why, in words, and the way to what opens it. */
+export function NotYet({ step, refusals }: { step: Step; refusals: Refusal[] }) {
+  const { t } = useWords();
+  const { pack, state, me, marked } = useFieldJob();
+  const next = nextStep(pack.checklist, state, me.person);
+  return (
+    <StepFrame
+      step={step}
+      answer={
+        <div className="border-2 border-ink bg-sheet px-3 py-2">
+          <p className="m-0 font-bold">{t('field.gate.notYet')}</p>
+          <ul className="m-0 grid gap-1 pl-5">
+            {refusals.map((refusal, index) => (
+              <li key={index}>
+                <MarkedText text={marked(refusal.says)} look="bold" />
+              </li>
+            ))}
+          </ul>
+        </div>
+      }
+      primary={
+        <FieldLink
+          look="primary"
+          to={next && next.id !== step.id ? paths.step(pack.job.id, next.id) : paths.myJob(pack.job.id)}
+        >
+          {t(next && next.id !== step.id ? 'field.gate.next' : 'field.job.open')}
+        </FieldLink>
+      }
+    />
+  );
+}

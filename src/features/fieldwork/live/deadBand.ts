@@ -1,0 +1,26 @@
+/** What a dead reading means: the bands of isolation.md §3. */
+import type { ReadingAsk } from '../../../../shared/checklist/types';
+import type { Panel, Supply } from '../../../../shared/panel/panelSchema';
+
+export type DeadBand = 'dead' | 'not-dead' | 'live';
+
+// isolation.md §3: up to 25 V AC / 60 V DC it is "not dead"; above, "live".
+const liveAboveV = { 'V AC': 25, 'V DC': 60 } as const;
+// isolation.md §3: a reading of 80 % of a supply means that the supply is still on, whatever the band.
+const stillOnShare = 0.8;
+
+/** An unknown unit counts as the stricter one: a missing datum is never assumed safe. */
+export function deadBand(ask: ReadingAsk, value: number): DeadBand {
+  const V = Math.abs(value);
+  if (V <= (ask.high ?? 0)) return 'dead';
+  return V > liveAboveV[ask.unit === 'V DC' ? 'V DC' : 'V AC'] ? 'live' : 'not-dead';
+}
+
+/** The supply the reading looks like, nearest first; undefined when it reaches 80 % of none. */
+export function supplyStillOn(panel: Panel, ask: ReadingAsk, value: number): Supply | undefined {
+  const V = Math.abs(value);
+  const near = panel.supplies
+    .filter((supply) => (supply.kind === 'dc') === (ask.unit === 'V DC') && V >= stillOnShare * supply.V)
+    .sort((a, b) => Math.abs(a.V - V) - Math.abs(b.V - V));
+  return near.find((supply) => supply.tag === ask.dead?.supply) ?? near[0];
+}

@@ -1,0 +1,13 @@
+import type { Step } from '../../../../shared/checklist/types';
+import { LoopDiagram } from '../../../diagrams/LoopDiagram';
+import { useFieldJob } from '../job/useFieldJob';
+import { LocksPicture } from '../locks/LocksPicture';
+
+/** The computed picture of a step: the loop of its point with the conductor in question thick, or the isolators in order. */
+export function StepPicture({ step }: { step: Step }) {
+  const { pack } = useFieldJob();
+  if (!step.picture) return null;
+  if (step.picture.kind === 'energy') return <LocksPicture isolator={step.where?.isolator} />;
+  const { point, mark } = step.picture;
+  return <LoopDiagram panel={pack.panel} point={point} {...(mark === undefined ? {} : { mark })} />;
+}
