@@ -13,7 +13,7 @@ const walkedEveryRound: ReadonlySet<Stage> = new Set([
 ]);
 
 type Given = Pick<Step, 'id' | 'stage' | 'family' | 'title' | 'ask'> &
-  Partial<Pick<Step, 'detail' | 'warnings' | 'where' | 'by' | 'everyRound' | 'picture'>>;
+  Partial<Pick<Step, 'detail' | 'warnings' | 'where' | 'by' | 'personal' | 'everyRound' | 'picture'>>;
 
 /** Parts are numbered later, by `intoParts`. */
 export function makeStep(given: Given): Step {
@@ -29,6 +29,7 @@ export function makeStep(given: Given): Step {
     ...(where ? { where } : {}),
     ask,
     by: given.by ?? 'one',
+    ...(given.personal ? { personal: true } : {}),
     needsIsolation: onDeadConductors.has(stage),
     everyRound: given.everyRound ?? walkedEveryRound.has(stage),
     ...(picture ? { picture } : {}),

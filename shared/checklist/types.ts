@@ -65,6 +65,11 @@ export interface Step {
   ask: Ask;
   /** `each`: every worker answers it alone (own lock, own dead tests); `one`: one answer serves the crew. */
   by: 'each' | 'one';
+  /**
+   * True on a `one` step whose answer counts only for the person who gave it: the terminal of a point, read dead.
+   * Whoever goes on with that point without having answered it themselves answers it again first.
+   */
+  personal?: true;
   /** True for a step that needs dead conductors and proof (Wire, Check cold). */
   needsIsolation: boolean;
   /** True when a round started by a fault re-opens it whatever points are affected (isolate, prove dead, close ...). */

@@ -3,6 +3,7 @@ import type { StillLive } from '../../../isolation/types';
 import { say, type Text } from '../../../panel/says';
 import { choice, done } from '../../asks';
 import type { Facts } from '../../facts';
+import { staysLive } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
@@ -14,22 +15,19 @@ const placeOf = ({ terminal, incomingOf, supply }: StillLive): Text =>
 const idOf = ({ terminal, incomingOf, supply }: StillLive) =>
   incomingOf !== undefined ? `incoming:${incomingOf}` : (terminal ?? supply ?? '');
 
-const covered = (place: StillLive): Step =>
-  makeStep({
-    id: `isolate.cover.${idOf(place)}`,
-    stage: 'isolate',
-    family: 'door-open',
-    title: say('checklist.isolate.cover', { place: placeOf(place) }),
-    warnings: [
-      {
-        signal: 'danger',
-        says: say('checklist.warning.stays-live', { place: placeOf(place), V: place.V }),
-      },
-    ],
-    where: place.incomingOf !== undefined ? { isolator: place.incomingOf } : { terminal: idOf(place) },
-    ask: choice(['covered'], ['not-covered']),
-    picture: { kind: 'energy' },
-  });
+const covered =
+  (facts: Facts) =>
+  (place: StillLive): Step =>
+    makeStep({
+      id: `isolate.cover.${idOf(place)}`,
+      stage: 'isolate',
+      family: 'door-open',
+      title: say('checklist.isolate.cover', { place: placeOf(place) }),
+      warnings: [staysLive(placeOf(place), place.V, facts.supply(place.supply)?.kind)],
+      where: place.incomingOf !== undefined ? { isolator: place.incomingOf } : { terminal: idOf(place) },
+      ask: choice(['covered'], ['not-covered']),
+      picture: { kind: 'energy' },
+    });
 
 const guarded = ({ supply, guard, reason }: Facts['plan']['guarded'][number]): Step =>
   makeStep({
@@ -42,7 +40,8 @@ const guarded = ({ supply, guard, reason }: Facts['plan']['guarded'][number]): S
     ask: choice(['guard-on'], ['guard-missing']),
   });
 
-export function doorOpen({ plan }: Facts): Step[] {
+export function doorOpen(facts: Facts): Step[] {
+  const { plan } = facts;
   const places = [...new Map(plan.cover.map((place) => [idOf(place), place])).values()];
   return [
     makeStep({
@@ -53,7 +52,7 @@ export function doorOpen({ plan }: Facts): Step[] {
       warnings: [{ signal: 'danger', says: say('checklist.warning.touch-nothing') }],
       ask: done('checklist.answer.open'),
     }),
-    ...places.map(covered),
+    ...places.map(covered(facts)),
     ...plan.guarded.map(guarded),
   ];
 }

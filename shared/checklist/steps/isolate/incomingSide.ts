@@ -2,6 +2,7 @@
 import { say } from '../../../panel/says';
 import { choice, deadReading } from '../../asks';
 import type { Facts, IsolatorFacts } from '../../facts';
+import { staysLive } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import { testerProved } from '../../testerProved';
 import type { Step } from '../../types';
@@ -28,18 +29,13 @@ function fedThrough({ panel }: Facts, tag: string) {
 }
 
 /** Work near a part that stays live: only with the employer's leave, said so in red. */
-const asLiveWork = (tag: string, V: number): Step =>
+const asLiveWork = (tag: string, V: number, kind: 'dc' | undefined): Step =>
   makeStep({
     id: `isolate.${tag}.live-work`,
     stage: 'isolate',
     family: 'incoming-side',
     title: say('checklist.isolate.live-work', { tag }),
-    warnings: [
-      {
-        signal: 'danger',
-        says: say('checklist.warning.stays-live', { place: say('checklist.place.incoming', { tag }), V }),
-      },
-    ],
+    warnings: [staysLive(say('checklist.place.incoming', { tag }), V, kind)],
     where: { isolator: tag },
     ask: choice(['live-work-allowed'], ['live-work-not-allowed']),
     by: 'each',
@@ -81,7 +77,7 @@ export function incomingSide(facts: Facts, { isolator, afterDoor }: IsolatorFact
   const { tag } = isolator;
   const { supply, V, kind } = fedThrough(facts, tag);
   const stays = facts.plan.cover.find(({ incomingOf }) => incomingOf === tag);
-  if (stays) return [asLiveWork(tag, stays.V)];
+  if (stays) return [asLiveWork(tag, stays.V, kind === 'dc' ? kind : undefined)];
   const proofs = testerProved(facts, [{ kind, V }]);
   const proved = (when: 'before' | 'after') => proofs(`isolate.${tag}`, when, 'isolate', 'one');
   return [...proved('before'), ...readings(facts, tag, supply), ...proved('after')];

@@ -54,7 +54,7 @@ function readings(facts: Facts, worked: PointFacts, { name, terminal }: Conducto
           second,
           proves,
         }),
-        by: 'one',
+        personal: true,
         picture: { kind: 'loop', point: address, mark: 'signal' },
       });
     }),

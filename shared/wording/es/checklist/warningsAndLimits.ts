@@ -7,7 +7,8 @@ export const warningsAndLimits = {
   'checklist.warning.stand-aside': 'Un arco podría quemarlo o matarlo. Póngase a un lado y aparte la cara.',
   'checklist.warning.tag-only': 'Una tarjeta no sujeta {tag}. Alguien podría cerrarlo y matarlo.',
   'checklist.warning.touch-nothing': 'Lo que hay tras la puerta lo matará si lo toca. No toque nada aún.',
-  'checklist.warning.stays-live': 'Esto sigue vivo a {V} V: {place}. Si lo toca, lo herirá o lo matará.',
+  'checklist.warning.stays-live': 'Esto sigue vivo a {V} V: {place}. Si lo toca, lo matará.',
+  'checklist.warning.stays-live-low': 'Esto sigue vivo a {V} V: {place}. Un corto podría quemarlo.',
   'checklist.warning.stored-energy':
     'La energía acumulada podría aplastar o matar: {what}. No se ponga en su camino.',
   'checklist.warning.stored-charge': '{supply} podría guardar su carga y darle una descarga mortal.',
