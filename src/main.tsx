@@ -2,10 +2,10 @@ import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';
 import { router } from './app/router';
-import { applyKeptTheme } from './components/theme';
+import { applyTheme } from './components/field/theme';
 import './components/tokens.css';
 
-applyKeptTheme();
+applyTheme();
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no element with id "root"');

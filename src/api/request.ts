@@ -18,6 +18,9 @@ interface RequestOptions {
   timeoutMs?: number;
 }
 
+/** The sender also runs where there is no document (a worker, a test). */
+const screenLanguage = (): string => (typeof document === 'undefined' ? 'en' : document.documentElement.lang || 'en');
+
 async function problemOf(response: Response): Promise<Problem> {
   const parsed = problem.safeParse(await response.json().catch(() => null));
   return parsed.success
@@ -41,6 +44,8 @@ export async function request<S extends z.ZodType>(
     signal: signal ? AbortSignal.any([signal, timeout]) : timeout,
     headers: {
       accept: 'application/json',
+      // Findings and problems come back as sentences: in the language of the screen.
+      'accept-language': screenLanguage(),
       ...(body === undefined ? {} : { 'content-type': 'application/json' }),
     },
     ...(body === undefined ? {} : { body: JSON.stringify(body) }),
