@@ -2,7 +2,7 @@
 import type { DeadTest, LockPlan, PlannedIsolator, StillLive, Wait } from '../isolation/types';
 import type { Group, Module, Panel, Point, Source, Supply } from '../panel/panelSchema';
 import type { Finding, StepSeed } from '../rules/finding';
-import { findingsInScope } from './findingsInScope';
+import { findingsInScope, type StayingFinding } from './findingsInScope';
 import { naturalCompare } from './naturalCompare';
 import { plannedIsolators } from './plannedIsolators';
 
@@ -54,8 +54,8 @@ export interface Facts extends ChecklistInput {
   /** Terminals that the stage Prove dead reads by name. */
   provedDead: ReadonlySet<string>;
   /** Findings that touch the scope, in a stable order. */
-  stays: Finding[];
-  seeds: (family: string) => (StepSeed & { finding: Finding })[];
+  stays: StayingFinding[];
+  seeds: (family: string) => (StepSeed & { finding: StayingFinding })[];
 }
 
 function inWalkingOrder(points: PointFacts[]): PointFacts[] {

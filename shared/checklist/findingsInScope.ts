@@ -1,34 +1,47 @@
 /** Which findings an electrician reads before this job, in an order that does not depend on the rules' own. */
+import { canonicalJson } from '../panel/canonical';
 import type { Finding, Where } from '../rules/finding';
 import type { ChecklistInput, PointFacts } from './facts';
 import { naturalCompare } from './naturalCompare';
 
 const places = ['point', 'group', 'module', 'supply', 'isolator', 'source', 'terminal'] as const;
 
+/** A finding with a name that stays the same when the checklist is made again: rule, place, and a number for the second. */
+export interface StayingFinding extends Finding {
+  id: string;
+}
+
 /** The narrowest place a finding names, as a person would call it. */
 export const placeOf = (where: Where): string => places.map((kind) => where[kind]).find(Boolean) ?? '';
 
-/** A key that names rule and place, stable over regeneration. */
-export const findingKey = ({ rule, where }: Finding): string => `${rule}.${placeOf(where)}`;
-
 /** A finding that names only a supply, isolator, source or terminal may reach any point: it is always read. */
-export function findingsInScope({ findings }: ChecklistInput, points: PointFacts[]): Finding[] {
+function touching(points: PointFacts[]): (where: Where) => boolean {
   const addresses = new Set(points.map(({ point }) => point.address));
   const groups = new Set(points.map(({ group }) => group.tag));
   const modules = new Set(points.map(({ module }) => module.tag));
-  const touches = ({ point, group, module }: Where) =>
-    point !== undefined
-      ? addresses.has(point)
-      : group !== undefined
-        ? groups.has(group)
-        : module === undefined || modules.has(module);
-  const seen = new Set<string>();
-  return [...findings]
-    .sort((a, b) => naturalCompare(findingKey(a), findingKey(b)))
-    .filter((finding) => {
-      const key = findingKey(finding);
-      const first = touches(finding.where) && !seen.has(key);
-      if (first) seen.add(key);
-      return first;
+  return ({ point, group, module }) => {
+    if (point !== undefined) return addresses.has(point);
+    return group !== undefined ? groups.has(group) : module === undefined || modules.has(module);
+  };
+}
+
+/** Sorted by rule and place; the same finding twice is read once, two of one rule at one place are both read. */
+export function findingsInScope({ findings }: ChecklistInput, points: PointFacts[]): StayingFinding[] {
+  const touches = touching(points);
+  const byContent = new Map(
+    findings
+      .filter(({ where }) => touches(where))
+      .map((finding) => [
+        canonicalJson(finding),
+        { finding, name: `${finding.rule}.${placeOf(finding.where)}` },
+      ]),
+  );
+  const counts = new Map<string, number>();
+  return [...byContent]
+    .sort(([a, x], [b, y]) => naturalCompare(x.name, y.name) || (a < b ? -1 : 1))
+    .map(([, { finding, name }]) => {
+      const count = (counts.get(name) ?? 0) + 1;
+      counts.set(name, count);
+      return { ...finding, id: count === 1 ? name : `${name}.${count}` };
     });
 }

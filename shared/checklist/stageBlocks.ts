@@ -66,7 +66,7 @@ function isolate(facts: Facts): Block[] {
     block('door', doorOpen(facts)),
     ...electrical
       .filter(({ afterDoor }) => afterDoor)
-      .map((each) => block('behind', [...incomingSide(facts, each), ...openIsolator(each)])),
+      .flatMap((each) => [block('behind', incomingSide(facts, each)), block('behind', openIsolator(each))]),
     block('fuses', fusesOut(facts)),
     ...isolators.filter(({ holds }) => holds).map(opening),
     ...plan.otherEnergy.map((source) => block('other', otherEnergy(source))),

@@ -2,6 +2,7 @@
 import { say, type Text } from '../panel/says';
 import type { Supply } from '../panel/panelSchema';
 import type { Facts } from './facts';
+import { inThousandths } from './inThousandths';
 import { naturalCompare } from './naturalCompare';
 
 export interface Limits {
@@ -13,8 +14,8 @@ export interface Limits {
 /** From the stated tolerance; undefined where none is stated, for a limit is never invented. */
 export function supplyLimits({ tag, V, tolerance }: Supply): Limits | undefined {
   if (!tolerance) return undefined;
-  const low = V * (1 + tolerance.minPct / 100);
-  const high = V * (1 + tolerance.maxPct / 100);
+  const low = inThousandths(V * (1 + tolerance.minPct / 100));
+  const high = inThousandths(V * (1 + tolerance.maxPct / 100));
   return { low, high, why: say('checklist.why.supply', { supply: tag, V, ...tolerance }) };
 }
 

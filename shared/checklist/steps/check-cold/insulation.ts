@@ -36,13 +36,21 @@ export function insulation(facts: Facts, { point, module, supply }: PointFacts):
   return [
     part('ends', { wire, terminal }, choice(['both-ends-off'], ['end-on'])),
     part('parts', { terminal }, choice(['parts-off'], ['parts-on'])),
-    part('module', { module: module.tag }, choice(['module-out'], ['module-in'])),
+    part(
+      'module',
+      { module: module.tag },
+      choice(['module-out', ...(module.pluggable ? [] : ['wire-off-module'])], ['module-in']),
+    ),
     part('guard', { wire }, choice(['guarded'], ['not-guarded'])),
     part('read', { wire, V, earth: facts.panel.earthTerminal }, reading, [
       { signal: 'warning', says: say('checklist.warning.insulation', { V }) },
     ]),
     part('discharge', { wire }, choice(['discharged'], ['not-discharged'])),
     part('back', { wire, terminal }, choice(['landed'], ['not-landed'])),
-    part('module-back', { module: module.tag }, choice(['module-in-again'], ['module-still-out'])),
+    part(
+      'module-back',
+      { module: module.tag },
+      choice(['module-in-again', ...(module.pluggable ? [] : ['module-stayed'])], ['module-still-out']),
+    ),
   ];
 }

@@ -2,7 +2,7 @@
 import { say } from '../../../panel/says';
 import { written } from '../../asks';
 import type { Facts } from '../../facts';
-import { findingKey, placeOf } from '../../findingsInScope';
+import { placeOf } from '../../findingsInScope';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
@@ -10,7 +10,7 @@ type Seed = ReturnType<Facts['seeds']>[number];
 
 const settled = ({ where, finding }: Seed): Step =>
   makeStep({
-    id: `cold.settle.${findingKey(finding)}.${placeOf(where)}`,
+    id: `cold.settle.${finding.id}.${placeOf(where)}`,
     stage: 'check-cold',
     family: 'settle-doubt',
     title: say('checklist.cold.settle', { place: placeOf(where) }),

@@ -2,27 +2,24 @@
 import type { Supply } from '../../../panel/panelSchema';
 import { say } from '../../../panel/says';
 import type { Facts } from '../../facts';
+import { liveMeasuring } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import { supplyLimits } from '../../supplyLimits';
 import type { Stage, Step } from '../../types';
 
 /** The pairs between poles; to neutral too where three phases carry one. */
-function polePairs({ terminals, V }: Supply): { a: string; b: string; name: string; V: number }[] {
-  if ('plus' in terminals) return [{ a: terminals.plus, b: terminals.minus, name: '+-0 V', V }];
-  if ('L' in terminals) return [{ a: terminals.L, b: terminals.N, name: 'L-N', V }];
+function polePairs({ terminals }: Supply): { a: string; b: string; name: string }[] {
+  if ('plus' in terminals) return [{ a: terminals.plus, b: terminals.minus, name: '+-0 V' }];
+  if ('L' in terminals) return [{ a: terminals.L, b: terminals.N, name: 'L-N' }];
   const { L1, L2 } = terminals;
-  const lines = [{ a: L1, b: L2, name: 'L1-L2', V }];
+  const lines = [{ a: L1, b: L2, name: 'L1-L2' }];
   if (!('L3' in terminals)) return lines;
-  return [
-    ...lines,
-    { a: L2, b: terminals.L3, name: 'L2-L3', V },
-    { a: L1, b: terminals.L3, name: 'L1-L3', V },
-  ];
+  return [...lines, { a: L2, b: terminals.L3, name: 'L2-L3' }, { a: L1, b: terminals.L3, name: 'L1-L3' }];
 }
 
 export const supplyReadings = (_facts: Facts, supplies: readonly Supply[], stage: Stage): Step[] =>
   supplies.flatMap((supply) =>
-    polePairs(supply).map(({ a, b, name, V }) => {
+    polePairs(supply).map(({ a, b, name }) => {
       const limits = supplyLimits(supply);
       return makeStep({
         id: `close.supply.${supply.tag}.${name}`,
@@ -30,10 +27,7 @@ export const supplyReadings = (_facts: Facts, supplies: readonly Supply[], stage
         family: 'supply-readings',
         title: say('checklist.close.supply', { supply: supply.tag, a, b }),
         detail: limits ? [] : [say('checklist.close.supply.no-limits')],
-        warnings:
-          supply.extraLow === 'none'
-            ? [{ signal: 'danger', says: say('checklist.warning.live-measuring', { V }) }]
-            : [],
+        warnings: liveMeasuring(supply),
         where: { supply: supply.tag, terminal: a },
         ask: {
           kind: 'reading',

@@ -2,14 +2,14 @@
 import { say } from '../../../panel/says';
 import { done } from '../../asks';
 import type { Facts } from '../../facts';
-import { findingKey, placeOf } from '../../findingsInScope';
+import { placeOf } from '../../findingsInScope';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
 export const findingsThatStay = ({ stays }: Facts): Step[] =>
   stays.map((finding) =>
     makeStep({
-      id: `ready.stays.${findingKey(finding)}`,
+      id: `ready.stays.${finding.id}`,
       stage: 'get-ready',
       family: 'findings-that-stay',
       title: say('checklist.ready.stays', { place: placeOf(finding.where) }),

@@ -4,38 +4,44 @@ import { choice, deadReading } from '../../asks';
 import type { Facts, IsolatorFacts } from '../../facts';
 import { staysLive } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
-import { testerProved } from '../../testerProved';
+import { naturalCompare } from '../../naturalCompare';
+import { testerProved, type KnownVoltage } from '../../testerProved';
 import type { Step } from '../../types';
 
 const functions = ['AC', 'DC'] as const;
 
-/** The highest voltage that can stand there: of every supply fed through it, every source of the panel counted in. */
-function fedThrough({ panel }: Facts, tag: string) {
+/** What can stand on its incoming side: everything that feeds a supply through it, at the voltages of those. */
+function fedThrough({ panel }: Facts, tag: string): { supply: string; known: KnownVoltage[] } {
   const supplies = panel.supplies.filter(({ feeds }) => feeds.some(({ through }) => through.includes(tag)));
-  const sources = new Set(
+  const from = new Set(
     supplies.flatMap(({ feeds }) =>
-      feeds.filter(({ through }) => through.includes(tag)).map(({ from }) => from),
+      feeds.filter(({ through }) => through.includes(tag)).map((feed) => feed.from),
     ),
   );
-  const from = [...panel.sources, ...panel.supplies].filter((each) => sources.has(each.tag));
-  const V = Math.max(0, ...supplies.map((each) => each.V), ...from.map((each) => each.V ?? 0));
-  const dc = supplies.length > 0 && supplies.every(({ kind }) => kind === 'dc');
-  const most = Math.max(...panel.supplies.map((each) => each.V), 0);
-  return {
-    supply: [...supplies.map((each) => each.tag)].sort()[0] ?? tag,
-    V: V || most,
-    kind: dc ? 'dc' : 'ac',
-  } as const;
+  const most = Math.max(...panel.supplies.map(({ V }) => V), ...panel.sources.map(({ V }) => V ?? 0));
+  const known = [
+    ...panel.sources
+      .filter((each) => from.has(each.tag))
+      .map(
+        ({ V, phases, kind }) =>
+          ({ kind: phases === 'dc' || kind === 'battery' ? 'dc' : 'ac', V: V ?? most }) as const,
+      ),
+    ...panel.supplies
+      .filter((each) => from.has(each.tag))
+      .map(({ V, kind }) => ({ kind: kind === 'dc' ? 'dc' : 'ac', V }) as const),
+  ];
+  const first = supplies.map((each) => each.tag).sort(naturalCompare)[0];
+  return { supply: first ?? tag, known: known.length > 0 ? known : [{ kind: 'ac', V: most }] };
 }
 
 /** Work near a part that stays live: only with the employer's leave, said so in red. */
-const asLiveWork = (tag: string, V: number, kind: 'dc' | undefined): Step =>
+const asLiveWork = (tag: string, V: number): Step =>
   makeStep({
     id: `isolate.${tag}.live-work`,
     stage: 'isolate',
     family: 'incoming-side',
     title: say('checklist.isolate.live-work', { tag }),
-    warnings: [staysLive(say('checklist.place.incoming', { tag }), V, kind)],
+    warnings: [staysLive(say('checklist.place.incoming', { tag }), V, undefined)],
     where: { isolator: tag },
     ask: choice(['live-work-allowed'], ['live-work-not-allowed']),
     by: 'each',
@@ -75,10 +81,10 @@ function readings(facts: Facts, tag: string, supply: string): Step[] {
 export function incomingSide(facts: Facts, { isolator, afterDoor }: IsolatorFacts): Step[] {
   if (!afterDoor) return [];
   const { tag } = isolator;
-  const { supply, V, kind } = fedThrough(facts, tag);
+  const { supply, known } = fedThrough(facts, tag);
   const stays = facts.plan.cover.find(({ incomingOf }) => incomingOf === tag);
-  if (stays) return [asLiveWork(tag, stays.V, kind === 'dc' ? kind : undefined)];
-  const proofs = testerProved(facts, [{ kind, V }]);
+  if (stays) return [asLiveWork(tag, stays.V)];
+  const proofs = testerProved(facts, known);
   const proved = (when: 'before' | 'after') => proofs(`isolate.${tag}`, when, 'isolate', 'one');
   return [...proved('before'), ...readings(facts, tag, supply), ...proved('after')];
 }

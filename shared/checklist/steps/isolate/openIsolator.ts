@@ -66,8 +66,8 @@ function lockedAndTagged({ isolator }: IsolatorFacts): Step[] {
     makeStep({
       ...common(tag),
       id: `isolate.${tag}.tag`,
-      title: say('checklist.isolate.tag', { tag }),
-      ask: choice(['tag-hangs'], ['tag-missing']),
+      title: say(tagOnly ? 'checklist.isolate.tag.filled' : 'checklist.isolate.tag', { tag }),
+      ask: choice(['tag-says-all'], ['tag-missing']),
       by: 'each',
     }),
   ];

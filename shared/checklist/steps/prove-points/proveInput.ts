@@ -4,9 +4,10 @@ import { choice } from '../../asks';
 import type { PointFacts } from '../../facts';
 import { cableDrop } from '../../cableDrop';
 import { deviceName } from '../../device';
+import { liveMeasuring } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import { offVolts } from '../../offVolts';
-import type { Ask, Stage, Step } from '../../types';
+import type { Ask, Stage, Step, Warning } from '../../types';
 import { inputOff, inputOn, type Window } from './windows';
 
 export function proveInput(worked: PointFacts, stage: Stage): Step[] {
@@ -14,7 +15,7 @@ export function proveInput(worked: PointFacts, stage: Stage): Step[] {
   const { address, terminal } = point;
   const { io } = module;
   const unit = supply?.kind === 'dc' ? 'V DC' : 'V AC';
-  const part = (name: string, ask: Ask) =>
+  const part = (name: string, ask: Ask, warnings: Warning[] = []) =>
     makeStep({
       id: `prove.${address}.${name}`,
       stage,
@@ -25,6 +26,7 @@ export function proveInput(worked: PointFacts, stage: Stage): Step[] {
         terminal,
         common: group.terminal,
       }),
+      warnings,
       where: { point: address, terminal },
       ask,
       picture: { kind: 'loop', point: address },
@@ -34,8 +36,8 @@ export function proveInput(worked: PointFacts, stage: Stage): Step[] {
   const off = io.kind === 'digital-input' ? inputOff(io, offVolts(io)) : {};
   return [
     part('on', choice(['light-and-bit-on'], ['light-or-bit-off'])),
-    part('on-volts', reading(inputOn(worked, drop))),
+    part('on-volts', reading(inputOn(worked, drop)), liveMeasuring(supply)),
     part('off', choice(['light-and-bit-off'], ['light-or-bit-on'])),
-    part('off-volts', reading(off)),
+    part('off-volts', reading(off), liveMeasuring(supply)),
   ];
 }

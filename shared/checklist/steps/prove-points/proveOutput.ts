@@ -4,6 +4,7 @@ import { choice } from '../../asks';
 import { cableDrop } from '../../cableDrop';
 import { deviceName, moves } from '../../device';
 import type { Facts, PointFacts } from '../../facts';
+import { liveMeasuring } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import type { Ask, Stage, Step, Warning } from '../../types';
 import { outputOff, outputOn, type Window } from './windows';
@@ -56,9 +57,9 @@ export function proveOutput(facts: Facts, worked: PointFacts, stage: Stage): Ste
   return [
     part('clear', choice(['area-clear'], ['someone-near']), warnings),
     part('command', choice(['only-this-acts'], ['acts-wrong'])),
-    part('on-volts', reading(outputOn(worked, drop))),
-    ...(current ? [part('current', current)] : []),
+    part('on-volts', reading(outputOn(worked, drop)), liveMeasuring(supply)),
+    ...(current ? [part('current', current, liveMeasuring(supply))] : []),
     part('off', choice(['device-off'], ['device-stays-on'])),
-    part('off-volts', reading(outputOff(worked))),
+    part('off-volts', reading(outputOff(worked)), liveMeasuring(supply)),
   ];
 }

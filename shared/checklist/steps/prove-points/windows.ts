@@ -4,6 +4,7 @@ import type { DigitalInput } from '../../../panel/moduleIo';
 import type { Supply } from '../../../panel/panelSchema';
 import { say, type Text } from '../../../panel/says';
 import type { PointFacts } from '../../facts';
+import { inThousandths } from '../../inThousandths';
 import { supplyLimits } from '../../supplyLimits';
 
 export interface Window {
@@ -24,7 +25,7 @@ export function inputOn(worked: PointFacts, cableDropV: number): Window {
   if (!limits || !worked.supply) return {};
   const drop = totalDrop(worked);
   return {
-    low: Math.max(0, limits.low - drop - cableDropV),
+    low: inThousandths(Math.max(0, limits.low - drop - cableDropV)),
     high: limits.high,
     why: say('checklist.why.input-on', {
       V: worked.supply.V,
@@ -35,10 +36,10 @@ export function inputOn(worked: PointFacts, cableDropV: number): Window {
   };
 }
 
-/** At most the module's own off voltage; without it no limit. */
+/** At most the module's own off voltage, either way round; without it no limit. */
 export function inputOff(io: DigitalInput, offV: number | undefined): Window {
   const high = io.thresholds?.UL_V ?? offV;
-  return high === undefined ? {} : { high, why: say('checklist.why.input-off', { V: high }) };
+  return high === undefined ? {} : { low: -high, high, why: say('checklist.why.input-off', { V: high }) };
 }
 
 // Default drop-out of a coil: 10 % DC, 15 % AC of its rated volts (wiring.md, from memory).
@@ -50,7 +51,7 @@ export function outputOn({ supply, module }: PointFacts, cableDropV: number): Wi
   if (!limits || !supply) return {};
   const drop = module.io.kind === 'digital-output' ? (module.io.onDropV ?? 0) : 0;
   return {
-    low: Math.max(0, limits.low - drop - cableDropV),
+    low: inThousandths(Math.max(0, limits.low - drop - cableDropV)),
     high: limits.high,
     why: say('checklist.why.output-on', {
       V: supply.V,
@@ -61,10 +62,11 @@ export function outputOn({ supply, module }: PointFacts, cableDropV: number): Wi
   };
 }
 
-/** Off, a load must see less than holds it in. */
+/** Off, a load must see less than holds it in, either way round. */
 export function outputOff({ supply, point }: PointFacts): Window {
   const { device } = point;
   if (!supply || device.kind !== 'load') return {};
   const percent = device.dropOutPct ?? dropOutPct(supply);
-  return { high: (device.V * percent) / 100, why: say('checklist.why.output-off', { V: device.V, percent }) };
+  const high = inThousandths((device.V * percent) / 100);
+  return { low: -high, high, why: say('checklist.why.output-off', { V: device.V, percent }) };
 }

@@ -2,6 +2,7 @@
 import { say } from '../../../panel/says';
 import { choice } from '../../asks';
 import type { Facts, PointFacts } from '../../facts';
+import { inThousandths } from '../../inThousandths';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
@@ -32,8 +33,8 @@ export function bleeder(facts: Facts, worked: PointFacts): Step[] {
       ask: {
         kind: 'reading',
         unit: 'ohm',
-        low: ohm * (1 - tolerance),
-        high: ohm * (1 + tolerance),
+        low: inThousandths(ohm * (1 - tolerance)),
+        high: inThousandths(ohm * (1 + tolerance)),
         why: say('checklist.why.bleeder', { ohm }),
       },
     }),

@@ -34,7 +34,7 @@ export function groupCommon(facts: Facts, { group, supply }: PointFacts): Step[]
     ...facts
       .seeds('check-fuse')
       .filter((seed) => seed.where.point === undefined && seed.where.group === tag)
-      .map((seed) => fuseToCheck(`wire.group.${tag}.check-fuse.${seed.finding.rule}`, tag, terminal, seed)),
+      .map((seed) => fuseToCheck(`wire.group.${tag}.check-fuse.${seed.finding.id}`, tag, terminal, seed)),
   ];
 }
 
@@ -67,7 +67,7 @@ export function pointFuse(facts: Facts, { point }: PointFacts): Step[] {
       .seeds('check-fuse')
       .filter((seed) => seed.where.point === address)
       .map((seed) =>
-        fuseToCheck(`wire.${address}.check-fuse.${seed.finding.rule}`, fuse?.tag ?? address, terminal, seed),
+        fuseToCheck(`wire.${address}.check-fuse.${seed.finding.id}`, fuse?.tag ?? address, terminal, seed),
       ),
   ];
 }

@@ -85,7 +85,7 @@ export const wiring = {
   'checklist.cold.panel-earth': 'Tire de los hilos de tierra en {earth} del tablero {panel}.',
   'checklist.cold.settle': 'Averigüe y escriba lo que ve en {place}.',
   'checklist.cold.insulation.ends': 'Suelte los dos extremos del hilo {wire}. Está en {terminal}.',
-  'checklist.cold.insulation.parts': 'Suelte de {terminal} el aparato y los supresores.',
+  'checklist.cold.insulation.parts': 'Suelte de {terminal} el aparato de campo y los supresores.',
   'checklist.cold.insulation.module': 'Extraiga el módulo {module}.',
   'checklist.cold.insulation.guard': 'Ponga un vigilante en el otro extremo de {wire}.',
   'checklist.cold.insulation.read': 'Pruebe el hilo {wire} contra {earth} con {V} V. Anote los Mohm.',
