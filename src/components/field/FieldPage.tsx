@@ -20,10 +20,10 @@ export function FieldPage({ header, banner, children, answer, footer }: FieldPag
         <div className="field-words">{children}</div>
         {answer && <div className="field-answer">{answer}</div>}
       </main>
-      <div className="field-foot">
+      <footer className="field-foot">
         {banner}
         {footer}
-      </div>
+      </footer>
     </div>
   );
 }

@@ -49,7 +49,7 @@ export function ReadingBox({
           event.preventDefault();
           onChange(padPress(value, key));
         }}
-        className="min-h-[3.4rem] w-full min-w-0 border-0 bg-transparent p-0 font-mono text-[2.4rem] leading-none font-semibold text-ink focus-visible:outline-offset-4"
+        className="min-h-[3.5rem] w-full min-w-0 border-0 bg-transparent p-0 font-mono text-[2.4rem] leading-none font-semibold text-ink focus-visible:outline-offset-4"
       />
       <span className="shrink-0 pl-3 text-[1.2rem]">{unit}</span>
     </div>

@@ -20,11 +20,11 @@ export function SaveLine({
   end?: ReactNode;
 }) {
   return (
-    <div className="flex min-h-8 items-center gap-2 border-t border-rule bg-paper px-4 text-[0.85rem] leading-tight text-muted">
+    <div className="save-line flex min-h-7 items-center gap-2 border-t border-rule bg-paper px-4 text-[0.85rem] leading-tight text-muted">
       <span className={ticked ? 'text-ink' : 'invisible'}>
         <Tick />
       </span>
-      <p role="status" className="m-0 flex-1 py-1">
+      <p role="status" className="m-0 flex-1 py-0.5">
         {children}
       </p>
       {end}

@@ -8,7 +8,7 @@ function Terminal({ cell, number }: { cell: StageCell; number: number }) {
     return (
       <span className="relative -my-1 flex shrink-0 items-center border-[3px] border-ink bg-sheet px-2.5 text-[0.82rem] font-bold whitespace-nowrap">
         {number} {cell.name}
-        <span className="absolute -bottom-[3px] left-1/2 h-0 w-0 -translate-x-1/2 border-x-[5px] border-b-[5px] border-x-transparent border-b-ink" />
+        <span className="absolute -bottom-[8px] left-1/2 h-0 w-0 -translate-x-1/2 border-x-[6px] border-t-[6px] border-x-transparent border-t-ink" />
       </span>
     );
   const fill = cell.status === 'done' ? 'bg-ink text-paper' : 'bg-sheet text-ink';
@@ -24,7 +24,7 @@ function Terminal({ cell, number }: { cell: StageCell; number: number }) {
 /** The stages as a terminal strip: done ones are filled, the current one carries its name. `words` says it aloud. */
 export function StageStrip({ cells, words }: { cells: StageCell[]; words: string }) {
   return (
-    <div className="bg-paper px-2 py-2">
+    <div className="px-2 pt-2 pb-2.5">
       <p className="sr-only">{words}</p>
       <div aria-hidden="true" className="flex h-[1.6rem] border border-ink">
         {cells.map((cell, index) => (

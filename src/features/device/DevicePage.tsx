@@ -47,7 +47,7 @@ export function DevicePage() {
         </ActionBar>
       }
     >
-      <h1 className="m-0 text-[1.6rem] leading-tight">{t('field.thisDevice')}</h1>
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">{t('field.thisDevice')}</h1>
       <UnsentSection />
       <PeopleSection />
       {here && <SelfTestSection person={here.person} />}

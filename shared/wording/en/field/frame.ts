@@ -27,7 +27,7 @@ export const frame = {
   'field.pad.wipe': 'Wipe',
   'field.unsent.none': 'All answers are sent.',
   'field.unsent.some':
-    '{n, plural, one {# answer not sent yet. It is safe here.} other {# answers not sent yet. They are safe here.}}',
+    'Saved on this phone. {n, plural, one {# answer not sent yet.} other {# answers not sent yet.}}',
   'field.unsent.noServer':
     '{n, plural, one {# answer not sent: no server since {since}. It is safe here.} other {# answers not sent: no server since {since}. They are safe here.}}',
   'field.unsent.signIn':

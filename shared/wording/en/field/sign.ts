@@ -51,6 +51,7 @@ export const sign = {
   'field.review.undecided': 'Waits for the foreman.',
   'field.review.twoTitle': 'Two answers: choose one',
   'field.review.choose': 'This one counts',
+  'field.review.openStep': 'Open the step',
   'field.review.done': 'You countersigned.',
   'field.review.sent': 'Returned. The electrician sees your words.',
 } as const;

@@ -27,7 +27,7 @@ export const frame = {
   'field.pad.wipe': 'Borrar',
   'field.unsent.none': 'Todas las respuestas están enviadas.',
   'field.unsent.some':
-    '{n, plural, one {# respuesta sin enviar. Está segura aquí.} other {# respuestas sin enviar. Están seguras aquí.}}',
+    'Guardado en este teléfono. {n, plural, one {# respuesta sin enviar.} other {# respuestas sin enviar.}}',
   'field.unsent.noServer':
     '{n, plural, one {# respuesta sin enviar: sin servidor desde {since}. Está segura aquí.} other {# respuestas sin enviar: sin servidor desde {since}. Están seguras aquí.}}',
   'field.unsent.signIn':

@@ -52,6 +52,7 @@ export const sign = {
   'field.review.undecided': 'Espera al encargado.',
   'field.review.twoTitle': 'Dos respuestas: elija una',
   'field.review.choose': 'Vale esta',
+  'field.review.openStep': 'Abrir el paso',
   'field.review.done': 'Ha refrendado.',
   'field.review.sent': 'Devuelto. El electricista ve sus palabras.',
 } as const;

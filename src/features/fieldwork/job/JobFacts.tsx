@@ -7,7 +7,7 @@ import { useFieldJob } from './useFieldJob';
 function Block({ title, children }: { title: string; children: ReactNode }) {
   return (
     <section className="border-t-2 border-ink pt-2">
-      <h2 className="m-0 text-[1.1rem] leading-tight">{title}</h2>
+      <h2 className="m-0 font-bold text-[1.1rem] leading-tight">{title}</h2>
       {children}
     </section>
   );

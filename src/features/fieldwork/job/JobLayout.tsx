@@ -18,7 +18,7 @@ function JobMissing() {
       header={<TitleStrip cells={[{ label: t('field.app'), value: t('field.job.missing') }]} />}
       banner={<UnsentLine />}
     >
-      <h1 className="m-0 text-[1.6rem] leading-tight">{t('field.job.missing')}</h1>
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">{t('field.job.missing')}</h1>
       <p className="m-0">{t('field.job.missingWhy')}</p>
       <FieldLink to={paths.myJobs} look="primary">
         {t('field.jobs.title')}

@@ -76,7 +76,7 @@ export function JobPage() {
     >
       <div>
         <p className="m-0 text-[0.95rem] text-muted">{t(`field.status.${state.status}`)}</p>
-        <h1 tabIndex={-1} className="m-0 text-[1.55rem] leading-tight outline-none">
+        <h1 tabIndex={-1} className="m-0 font-bold text-[1.55rem] leading-tight outline-none">
           {t('field.job.title', { number: pack.job.number, points: pack.checklist.scope.length })}
         </h1>
       </div>

@@ -76,7 +76,7 @@ export function MyJobsPage() {
         </ActionBar>
       }
     >
-      <h1 className="m-0 text-[1.6rem] leading-tight">{t('field.jobs.title')}</h1>
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">{t('field.jobs.title')}</h1>
       {jobs && <Jobs jobs={jobs} person={here.person} />}
       {more && (
         <Sheet

@@ -26,8 +26,8 @@ export function UnsentLine({ saved }: { saved?: string }) {
   });
   const linked = key === 'field.unsent.attention' || key === 'field.unsent.signIn';
   return (
-    <SaveLine ticked={saved !== undefined || key === 'field.unsent.none'}>
-      {saved && <>{saved} </>}
+    <SaveLine ticked={key !== 'field.unsent.attention'}>
+      {saved && key === 'field.unsent.none' && <>{saved} </>}
       {linked ? (
         <Link
           className="inline-flex min-h-14 items-center text-ink"

@@ -74,7 +74,7 @@ export function LiveMeasure({ live, onBack }: { live: LiveReading; onBack: () =>
       }
     >
       <SignalBox signal="danger">{t('field.live.treatAsLive')}</SignalBox>
-      <h1 className="m-0 text-[1.55rem] leading-[1.25]">
+      <h1 className="m-0 font-bold text-[1.55rem] leading-[1.25]">
         <MarkedText text={marked(live.step.title)} />
       </h1>
     </FieldPage>

@@ -16,7 +16,12 @@ import { SignalHead } from './SignalHead';
 
 /** Colours of the whole screen: white on red for live, ink on paper under an orange head for not dead. */
 const looks = {
-  live: { page: 'bg-danger text-white', primary: 'danger', second: 'dangerOutlined', rule: 'border-white' },
+  live: {
+    page: 'field-red bg-danger text-white',
+    primary: 'danger',
+    second: 'dangerOutlined',
+    rule: 'border-white',
+  },
   'not-dead': { page: 'bg-paper text-ink', primary: 'primary', second: 'outlined', rule: 'border-ink' },
 } as const;
 
@@ -45,10 +50,10 @@ function Measured({ live }: { live: LiveReading }) {
 
 function LiveFoot({ children, rule }: { children: ReactNode; rule: string }) {
   return (
-    <div className={`field-foot border-t-2 ${rule}`}>
+    <footer className={`field-foot border-t-2 ${rule}`}>
       <UnsentLine />
       <div className="grid gap-2 px-3 py-2.5">{children}</div>
-    </div>
+    </footer>
   );
 }
 
@@ -74,7 +79,7 @@ export function LiveScreen({ live, onMeasure }: { live: LiveReading; onMeasure: 
       <SignalHead band={band} />
       <main className="field-main">
         <div className="field-words">
-          <h1 ref={heading} tabIndex={-1} className="m-0 text-[2.3rem] leading-[1.12] font-bold outline-none">
+          <h1 ref={heading} tabIndex={-1} className="m-0 font-bold text-[2.3rem] leading-[1.12] outline-none">
             {t(band === 'live' ? 'field.live.live' : 'field.live.notDead')}
             <br />
             {t(band === 'live' ? 'field.live.stepBack' : 'field.live.findOut')}
@@ -83,7 +88,7 @@ export function LiveScreen({ live, onMeasure }: { live: LiveReading; onMeasure: 
           {stillOn && (
             <p className="m-0 font-bold">{t('field.live.stillOn', { supply: stillOn.tag, V: stillOn.V })}</p>
           )}
-          <h2 className={`m-0 mt-1 border-t-2 pt-3 text-[1.1rem] ${look.rule}`}>
+          <h2 className={`m-0 mt-1 border-t-2 font-bold pt-3 text-[1.1rem] ${look.rule}`}>
             {t('field.live.whatFeeds')}
           </h2>
           <ul className="m-0 grid list-none gap-2 p-0">

@@ -49,7 +49,7 @@ export function LocksPage() {
         </ActionBar>
       }
     >
-      <h1 className="m-0 text-[1.55rem] leading-tight">{t('field.locks.title')}</h1>
+      <h1 className="m-0 font-bold text-[1.55rem] leading-tight">{t('field.locks.title')}</h1>
       <OwnProof />
       <p className="m-0 text-muted">
         {local.pulledAt

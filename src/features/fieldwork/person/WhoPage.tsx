@@ -17,7 +17,7 @@ function PersonPin({ person, onBack }: { person: DevicePerson; onBack: () => voi
   const store = useDeviceStore();
   return (
     <>
-      <h1 className="m-0 text-[1.6rem] leading-tight">{person.name}</h1>
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">{person.name}</h1>
       <PinForm
         label={t('field.pin.yours')}
         submit={t('field.pin.open')}
@@ -44,7 +44,7 @@ function PersonList({
   const { t } = useWords();
   return (
     <>
-      <h1 className="m-0 text-[1.6rem] leading-tight">
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">
         {t(people.length ? 'field.who.title' : 'field.who.nobody')}
       </h1>
       {people.map((person) => (

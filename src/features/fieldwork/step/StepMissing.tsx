@@ -12,7 +12,7 @@ export function StepMissing() {
   const { pack } = useFieldJob();
   return (
     <FieldPage header={<JobHeader />} banner={<UnsentLine />}>
-      <h1 className="m-0 text-[1.6rem] leading-tight">{t('field.step.missing')}</h1>
+      <h1 className="m-0 font-bold text-[1.6rem] leading-tight">{t('field.step.missing')}</h1>
       <FieldLink to={paths.myJob(pack.job.id)} look="primary">
         {t('field.job.open')}
       </FieldLink>

@@ -41,7 +41,7 @@ export function StepWords({ step }: { step: Step }) {
     <>
       <div className="grid gap-1">
         <PlaceWords step={step} />
-        <h1 ref={heading} tabIndex={-1} className="m-0 text-[1.55rem] leading-[1.25] font-bold outline-none">
+        <h1 ref={heading} tabIndex={-1} className="m-0 font-bold text-[1.55rem] leading-[1.25] outline-none">
           <MarkedText text={marked(step.title)} />
         </h1>
       </div>

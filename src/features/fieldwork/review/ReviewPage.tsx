@@ -1,0 +1,3 @@
+export function ReviewPage() {
+  return null;
+}

@@ -1,0 +1,3 @@
+export function SignPage() {
+  return null;
+}

@@ -1,0 +1,141 @@
+/** A small invented panel for looking at the field screens: 24 V DC inputs and a relay common fed from another panel. */
+import type { Panel } from '../../../shared/panel/panelSchema';
+
+const isolator = {
+  inPanel: false,
+  inSight: true,
+  operatedFrom: 'outside',
+  opens: 'all-live',
+  loadBreak: true,
+  suitableForIsolation: true,
+  purpose: 'both',
+  lock: 'hasp',
+} as const;
+
+const threeWire = { dropV: 2, leakmA: 0.1, maxmA: 200, supplymA: 12 };
+
+export const samplePanel: Panel = {
+  format: 'coldloop-panel/1',
+  tag: 'HQ-LP3',
+  name: 'filter gallery',
+  location: 'Filter gallery, basement',
+  drawing: { number: 'E-204', revision: 'C' },
+  practice: 'IEC 60204-1',
+  frequencyHz: 50,
+  disconnect: 'Q1',
+  earthTerminal: 'PE1',
+  sources: [
+    { tag: 'HQ-DB1', kind: 'feeder', description: 'Main board', location: 'Pump hall', V: 230, phases: 1 },
+    {
+      tag: 'HQ-MC2',
+      kind: 'other-panel',
+      description: 'Pump panel',
+      location: 'Pump hall',
+      V: 120,
+      phases: 1,
+    },
+  ],
+  isolators: [
+    { ...isolator, tag: 'Q1', kind: 'disconnect', location: 'Side of the panel' },
+    {
+      ...isolator,
+      tag: 'F12',
+      kind: 'breaker',
+      location: 'Pump hall, left door',
+      inSight: false,
+      lock: 'device-needed',
+      alsoFeeds: ['Dosing pump P4'],
+    },
+  ],
+  supplies: [
+    {
+      tag: 'S24',
+      description: '24 V DC for inputs',
+      kind: 'dc',
+      purpose: 'field',
+      V: 24,
+      earthed: true,
+      terminals: { plus: 'X1:1', minus: 'X1:2' },
+      feeds: [{ from: 'HQ-DB1', through: ['Q1'] }],
+      bulk: { uF: 4700, dischargeS: 20 },
+      extraLow: 'PELV',
+    },
+    {
+      tag: 'C2',
+      description: '120 V AC from the pump panel',
+      kind: 'ac1',
+      purpose: 'field',
+      V: 120,
+      earthed: true,
+      terminals: { L: 'X5:1', N: 'X5:2' },
+      feeds: [{ from: 'HQ-MC2', through: ['F12'] }],
+      bulk: 'none',
+      extraLow: 'none',
+    },
+  ],
+  modules: [
+    {
+      tag: 'DI3',
+      slot: '3',
+      description: '16 inputs 24 V DC',
+      io: { kind: 'digital-input', V: 24, current: 'dc', type: 3, ratedmA: 2.5, polarity: 'positive-only' },
+    },
+    {
+      tag: 'DO5',
+      slot: '5',
+      description: '8 relays',
+      io: { kind: 'digital-output', technology: 'relay', Vmin: 5, Vmax: 250, pointA: 2 },
+    },
+  ],
+  groups: [
+    {
+      tag: 'DI3.A',
+      module: 'DI3',
+      terminal: 'X3:C',
+      supply: 'S24',
+      common: 'negative',
+      fuse: { tag: 'F7', A: 0.5, kind: 'miniature-F' },
+    },
+    {
+      tag: 'DO5.A',
+      module: 'DO5',
+      terminal: 'X5:C2',
+      supply: 'C2',
+      common: 'line',
+      fuse: { tag: 'F8', A: 2, kind: 'gG' },
+    },
+  ],
+  points: [
+    {
+      address: 'DI3.07',
+      terminal: 'X3:14',
+      wire: '3014',
+      description: 'Filter 2 level high',
+      group: 'DI3.A',
+      device: { kind: 'pnp', tag: 'B7', location: 'Filter 2', ...threeWire },
+      cable: { tag: 'W21', size: { mm2: 0.5 }, lengthM: 32, colours: ['BN', 'BK', 'BU'] },
+      otherSupply: 'none',
+    },
+    {
+      address: 'DI3.08',
+      terminal: 'X3:16',
+      wire: '3016',
+      description: 'Hatch closed',
+      group: 'DI3.A',
+      device: { kind: 'contact', tag: 'S8', location: 'Hatch' },
+      cable: { tag: 'W22', size: { mm2: 0.5 }, lengthM: 18 },
+      otherSupply: 'none',
+    },
+    {
+      address: 'DO5.02',
+      terminal: 'X5:4',
+      wire: '5004',
+      description: 'Pump P4 run',
+      group: 'DO5.A',
+      device: { kind: 'load', tag: 'K4', load: 'coil', V: 120, current: 'ac', A: 0.1, polarised: false },
+      cable: { tag: 'W40', size: { mm2: 1.5 }, lengthM: 60 },
+      otherSupply: 'none',
+    },
+  ],
+  stopControls: [],
+};
