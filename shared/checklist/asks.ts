@@ -4,14 +4,22 @@ import type { Ask, ReadingAsk } from './types';
 
 export const done = (key = 'checklist.answer.done'): Ask => ({ kind: 'done', label: say(key) });
 
-/** A choice of one good answer and the bad ones; `keys` are wording keys under `checklist.choice`. */
+const plainChoices = new Map<string, Ask>();
+
+/** A choice of good answers and bad ones, by their names under `checklist.choice`. */
 export function choice(good: readonly string[], bad: readonly string[], params?: Text['params']): Ask {
+  // The same few choices stand in thousands of steps: those without values are made once.
+  const name = `${good.join()}/${bad.join()}`;
+  const known = params ? undefined : plainChoices.get(name);
+  if (known) return known;
   const option = (ok: boolean) => (value: string) => ({
     value,
     label: say(`checklist.choice.${value}`, params),
     ok,
   });
-  return { kind: 'choice', options: [...good.map(option(true)), ...bad.map(option(false))] };
+  const made: Ask = { kind: 'choice', options: [...good.map(option(true)), ...bad.map(option(false))] };
+  if (!params) plainChoices.set(name, made);
+  return made;
 }
 
 /** Names and numbers a person writes: long enough for a sentence. */

@@ -4,6 +4,7 @@ import type { Group, Module, Panel, Point, Source, Supply } from '../panel/panel
 import type { Finding, StepSeed } from '../rules/finding';
 import { findingsInScope, type StayingFinding } from './findingsInScope';
 import { naturalCompare } from './naturalCompare';
+import { neighboursIn } from './neighbours';
 import { plannedIsolators } from './plannedIsolators';
 
 export type FerruleScheme = 'DIN 46228-4' | 'German old code' | 'French code';
@@ -51,6 +52,8 @@ export interface Facts extends ChecklistInput {
   supply: (tag: string | undefined) => Supply | undefined;
   /** A point of the scope by its address. */
   worked: (address: string) => PointFacts | undefined;
+  /** The terminals beside a terminal of a module in scope. */
+  beside: (module: string, terminal: string) => string[];
   /** Terminals that the stage Prove dead reads by name. */
   provedDead: ReadonlySet<string>;
   /** Findings that touch the scope, in a stable order. */
@@ -100,6 +103,7 @@ export function factsOf(input: ChecklistInput): Facts {
   const lost = input.scope.find((address) => !known.has(address));
   if (lost !== undefined) throw new Error(`point ${lost} is not in the panel`);
   const supplies = new Map(input.panel.supplies.map((supply) => [supply.tag, supply]));
+  const modules = [...new Set(points.map(({ module }) => module))];
   const stays = findingsInScope(input, points);
   const seeds = stays.flatMap((finding) => (finding.addsSteps ?? []).map((seed) => ({ ...seed, finding })));
   const byFamily = new Map<string, typeof seeds>();
@@ -108,7 +112,8 @@ export function factsOf(input: ChecklistInput): Facts {
     ...input,
     points,
     groups: [...new Set(points.map(({ group }) => group))],
-    modules: [...new Set(points.map(({ module }) => module))],
+    modules,
+    beside: neighboursIn(input.panel, modules),
     isolators: plannedIsolators(input),
     supply: (tag) => (tag === undefined ? undefined : supplies.get(tag)),
     worked: (address) => known.get(address),

@@ -10,7 +10,7 @@ import { stages, type Checklist } from './types';
  */
 export function generateChecklist(input: ChecklistInput): Checklist {
   const facts = factsOf(input);
-  const steps = stages.flatMap((stage) => intoParts(stageBlocks[stage](facts)));
+  const steps = stages.map((stage) => intoParts(stageBlocks[stage](facts))).flat();
   const ids = new Set<string>();
   for (const { id } of steps) {
     if (ids.has(id)) throw new Error(`two steps share the id ${id}`);

@@ -12,26 +12,27 @@ export interface Block {
 }
 
 const chunks = (steps: Step[]): Step[][] => {
+  if (steps.length <= partSize) return [steps];
   const count = Math.ceil(steps.length / partSize);
   const size = Math.ceil(steps.length / count);
   return Array.from({ length: count }, (_, i) => steps.slice(i * size, (i + 1) * size));
 };
 
-/** Numbers the parts from 1; a block is cut only when it alone exceeds a part. */
+/** Numbers the parts of freshly made steps from 1; a block is cut only when it alone exceeds a part. */
 export function intoParts(blocks: readonly Block[]): Step[] {
   let part = 1;
   let room = partSize;
   let section: string | undefined;
-  return blocks
-    .filter(({ steps }) => steps.length > 0)
-    .flatMap((block) =>
-      chunks(block.steps).flatMap((chunk) => {
-        const fresh = section !== undefined && (section !== block.section || chunk.length > room);
-        if (fresh) part += 1;
-        if (fresh) room = partSize;
-        section = block.section;
-        room -= chunk.length;
-        return chunk.map((step) => ({ ...step, part }));
-      }),
-    );
+  const numbered: Step[] = [];
+  for (const block of blocks.filter(({ steps }) => steps.length > 0))
+    for (const chunk of chunks(block.steps)) {
+      const fresh = section !== undefined && (section !== block.section || chunk.length > room);
+      if (fresh) part += 1;
+      if (fresh) room = partSize;
+      section = block.section;
+      room -= chunk.length;
+      for (const step of chunk) step.part = part;
+      numbered.push(...chunk);
+    }
+  return numbered;
 }

@@ -15,23 +15,24 @@ const walkedEveryRound: ReadonlySet<Stage> = new Set([
 type Given = Pick<Step, 'id' | 'stage' | 'family' | 'title' | 'ask'> &
   Partial<Pick<Step, 'detail' | 'warnings' | 'where' | 'by' | 'personal' | 'everyRound' | 'picture'>>;
 
-/** Parts are numbered later, by `intoParts`. */
+/** Parts are numbered later, by `intoParts`. Fields are set in one fixed order: a checklist has tens of thousands of these. */
 export function makeStep(given: Given): Step {
   const { id, stage, family, title, ask, detail, warnings, where, picture } = given;
-  return {
+  const step: Step = {
     id,
     stage,
     part: 1,
     family,
     title,
-    ...(detail && detail.length > 0 ? { detail } : {}),
-    ...(warnings && warnings.length > 0 ? { warnings } : {}),
-    ...(where ? { where } : {}),
     ask,
     by: given.by ?? 'one',
-    ...(given.personal ? { personal: true } : {}),
     needsIsolation: onDeadConductors.has(stage),
     everyRound: given.everyRound ?? walkedEveryRound.has(stage),
-    ...(picture ? { picture } : {}),
   };
+  if (detail && detail.length > 0) step.detail = detail;
+  if (warnings && warnings.length > 0) step.warnings = warnings;
+  if (where) step.where = where;
+  if (given.personal) step.personal = true;
+  if (picture) step.picture = picture;
+  return step;
 }

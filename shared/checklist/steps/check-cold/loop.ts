@@ -49,21 +49,10 @@ function continuity(point: Point): Step[] {
   ];
 }
 
-/** Terminals that stand beside this one among the module's points; what is landed on them may touch it. */
-function neighboursOf({ panel }: Facts, { point, module, group }: PointFacts): string[] {
-  if (module.terminals) {
-    const at = module.terminals.indexOf(point.terminal);
-    if (at >= 0)
-      return [module.terminals[at - 1], module.terminals[at + 1]].filter((each) => each !== undefined);
-  }
-  const others = panel.points.filter((each) => each.group === group.tag && each.terminal !== point.terminal);
-  return others.length > 0 ? [group.terminal] : [];
-}
-
 export function loop(facts: Facts, worked: PointFacts): Step[] {
   const { point } = worked;
   const { address, terminal } = point;
-  const neighbours = neighboursOf(facts, worked);
+  const neighbours = facts.beside(worked.module.tag, terminal);
   const beside = (neighbour: string) =>
     makeStep({
       ...common(point),
