@@ -2,10 +2,10 @@
 import type { DeadTest, LockPlan, PlannedIsolator, StillLive, Wait } from '../isolation/types';
 import type { Group, Module, Panel, Point, Source, Supply } from '../panel/panelSchema';
 import type { Finding, StepSeed } from '../rules/finding';
-import { findingsInScope, type StayingFinding } from './findingsInScope';
 import { naturalCompare } from './naturalCompare';
 import { neighboursIn } from './neighbours';
 import { plannedIsolators } from './plannedIsolators';
+import { stayingFindings, type StayingFinding } from './stayingFindings';
 
 export type FerruleScheme = 'DIN 46228-4' | 'German old code' | 'French code';
 
@@ -104,7 +104,11 @@ export function factsOf(input: ChecklistInput): Facts {
   if (lost !== undefined) throw new Error(`point ${lost} is not in the panel`);
   const supplies = new Map(input.panel.supplies.map((supply) => [supply.tag, supply]));
   const modules = [...new Set(points.map(({ module }) => module))];
-  const stays = findingsInScope(input, points);
+  const isolators = plannedIsolators(input);
+  const stays = stayingFindings(
+    input,
+    isolators.map(({ isolator }) => isolator.tag),
+  );
   const seeds = stays.flatMap((finding) => (finding.addsSteps ?? []).map((seed) => ({ ...seed, finding })));
   const byFamily = new Map<string, typeof seeds>();
   for (const seed of seeds) byFamily.set(seed.family, [...(byFamily.get(seed.family) ?? []), seed]);
@@ -114,7 +118,7 @@ export function factsOf(input: ChecklistInput): Facts {
     groups: [...new Set(points.map(({ group }) => group))],
     modules,
     beside: neighboursIn(input.panel, modules),
-    isolators: plannedIsolators(input),
+    isolators,
     supply: (tag) => (tag === undefined ? undefined : supplies.get(tag)),
     worked: (address) => known.get(address),
     provedDead: new Set(input.deadTests.filter(({ at }) => !('point' in at)).map(({ terminal }) => terminal)),

@@ -432,9 +432,10 @@ describe('getting ready', () => {
     ]);
   });
 
-  test('leaves out findings of points that are not worked', () => {
+  test('reads findings of points that share a group with the worked ones, and of no others', () => {
     const few = generateChecklist({ ...exampleInput(), scope: ['DI3.01'] });
     expect(ids(few).filter((id) => id.startsWith('ready.stays'))).toEqual([
+      'ready.stays.input.leakage.DI3.02',
       'ready.stays.supply.no-tolerance.S24',
     ]);
   });

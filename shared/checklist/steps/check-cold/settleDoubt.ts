@@ -2,7 +2,7 @@
 import { say } from '../../../panel/says';
 import { written } from '../../asks';
 import type { Facts } from '../../facts';
-import { placeOf } from '../../findingsInScope';
+import { placeOf } from '../../stayingFindings';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
@@ -29,11 +29,11 @@ export const settlePointDoubt = (facts: Facts, address: string): Step[] =>
       .map(settled),
   );
 
-/** Doubts about a supply, a group, a module: once for the panel. */
+/** Doubts about a supply, a group, a module, or a point beside the worked ones: once for the panel. */
 export const settlePanelDoubt = (facts: Facts): Step[] =>
   once(
     facts
       .seeds('settle-doubt')
-      .filter(({ where }) => where.point === undefined)
+      .filter(({ where }) => where.point === undefined || !facts.worked(where.point))
       .map(settled),
   );

@@ -2,7 +2,7 @@
 import { say } from '../../../panel/says';
 import { done } from '../../asks';
 import type { Facts } from '../../facts';
-import { placeOf } from '../../findingsInScope';
+import { placeOf } from '../../stayingFindings';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 

@@ -60,9 +60,9 @@ export const beforePower = {
     'Read the AC voltage from the incoming side of {tag} to {earth}. Enter the highest.',
   'checklist.isolate.incoming.earth.dc':
     'Read the DC voltage from the incoming side of {tag} to {earth}. Enter the highest.',
-  'checklist.isolate.release': 'Let out the {what} of {tag}.',
+  'checklist.isolate.release': 'Release the energy of {tag}: {what}.',
   'checklist.isolate.release.unknown': 'The panel file does not say how. Ask first.',
-  'checklist.isolate.verify': 'Check that the {what} of {tag} is gone.',
+  'checklist.isolate.verify': 'Check that the energy of {tag} is gone: {what}.',
   'checklist.isolate.verify.unknown': 'The panel file does not say how. Ask, then look.',
   'checklist.place.incoming': 'the incoming side of {tag}',
   'checklist.place.terminal': 'terminal {terminal}',

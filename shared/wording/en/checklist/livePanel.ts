@@ -43,7 +43,7 @@ export const livePanel = {
   'checklist.prove.analogue.compare': 'Match {address} in the controller with {device}.',
   'checklist.prove.analogue.change': 'Make {device} change. Watch {address}.',
   'checklist.motion.clear': 'Look that everyone stands clear of what panel {panel} moves.',
-  'checklist.motion.energy': 'Look at {tag} now that its {what} is back.',
+  'checklist.motion.energy': 'Look at {tag} now that it is back: {what}.',
   'checklist.motion.point': 'Watch {device} move under {address}.',
   'checklist.motion.handback': 'Give panel {panel} back. Write who took it.',
   'checklist.sign.read': 'Read the summary of this job to the end.',

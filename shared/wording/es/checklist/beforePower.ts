@@ -60,9 +60,9 @@ export const beforePower = {
     'Lea la tensión AC de la entrada de {tag} a {earth}. Anote la mayor.',
   'checklist.isolate.incoming.earth.dc':
     'Lea la tensión DC de la entrada de {tag} a {earth}. Anote la mayor.',
-  'checklist.isolate.release': 'Descargue {what} de {tag}.',
+  'checklist.isolate.release': 'Descargue la energía de {tag}: {what}.',
   'checklist.isolate.release.unknown': 'El archivo del tablero no dice cómo. Pregunte primero.',
-  'checklist.isolate.verify': 'Compruebe que no queda {what} en {tag}.',
+  'checklist.isolate.verify': 'Compruebe que {tag} quedó sin energía: {what}.',
   'checklist.isolate.verify.unknown': 'El archivo del tablero no dice cómo. Pregunte y luego mire.',
   'checklist.place.incoming': 'la entrada de {tag}',
   'checklist.place.terminal': 'el borne {terminal}',

@@ -43,7 +43,7 @@ export const livePanel = {
   'checklist.prove.analogue.compare': 'Compare {address} en el controlador con {device}.',
   'checklist.prove.analogue.change': 'Haga que {device} cambie. Observe {address}.',
   'checklist.motion.clear': 'Vea que todos estén lejos de lo que mueve el tablero {panel}.',
-  'checklist.motion.energy': 'Mire {tag} otra vez con {what}.',
+  'checklist.motion.energy': 'Mire {tag} ahora que volvió: {what}.',
   'checklist.motion.point': 'Observe cómo se mueve {device} con {address}.',
   'checklist.motion.handback': 'Entregue el tablero {panel}. Escriba quién lo recibió.',
   'checklist.sign.read': 'Lea el resumen de este trabajo hasta el final.',

@@ -25,7 +25,7 @@ export const wiring = {
   'checklist.wire.fuse': 'Lea los amperios del fusible {fuse} para {terminal}.',
   'checklist.wire.suppressor.load': 'Monte {what} en la carga de {terminal}.',
   'checklist.wire.suppressor.contact': 'Monte {what} en paralelo con el contacto de {terminal}.',
-  'checklist.wire.suppressor.direction': 'Oriente la banda de {what} en {terminal} hacia el positivo.',
+  'checklist.wire.suppressor.direction': 'Oriente la banda hacia el positivo en {terminal}: {what}.',
   'checklist.wire.screen.panel':
     'Ponga a tierra la pantalla de {cable} en {terminal}. Deje libre el otro extremo.',
   'checklist.wire.screen.field':
@@ -56,7 +56,7 @@ export const wiring = {
   'checklist.suppressor.tvs': 'el diodo TVS',
   'checklist.suppressor.zener': 'el diodo zener',
   'checklist.suppressor.rc': 'el filtro RC',
-  'checklist.suppressor.mov': 'el varistor MOV',
+  'checklist.suppressor.mov': 'el varistor',
   'checklist.size.mm2': '{mm2} mm²',
   'checklist.size.awg': '{awg} AWG',
   'checklist.size.awg-aught': '{aughts}/0 AWG',

@@ -1,7 +1,8 @@
 /** Which findings an electrician reads before this job, in an order that does not depend on the rules' own. */
 import { canonicalJson } from '../panel/canonical';
+import { findingsInScope } from '../rules/findingsInScope';
 import type { Finding, Where } from '../rules/finding';
-import type { ChecklistInput, PointFacts } from './facts';
+import type { ChecklistInput } from './facts';
 import { naturalCompare } from './naturalCompare';
 
 const places = ['point', 'group', 'module', 'supply', 'isolator', 'source', 'terminal'] as const;
@@ -14,27 +15,16 @@ export interface StayingFinding extends Finding {
 /** The narrowest place a finding names, as a person would call it. */
 export const placeOf = (where: Where): string => places.map((kind) => where[kind]).find(Boolean) ?? '';
 
-/** A finding that names only a supply, isolator, source or terminal may reach any point: it is always read. */
-function touching(points: PointFacts[]): (where: Where) => boolean {
-  const addresses = new Set(points.map(({ point }) => point.address));
-  const groups = new Set(points.map(({ group }) => group.tag));
-  const modules = new Set(points.map(({ module }) => module.tag));
-  return ({ point, group, module }) => {
-    if (point !== undefined) return addresses.has(point);
-    return group !== undefined ? groups.has(group) : module === undefined || modules.has(module);
-  };
-}
-
 /** Sorted by rule and place; the same finding twice is read once, two of one rule at one place are both read. */
-export function findingsInScope({ findings }: ChecklistInput, points: PointFacts[]): StayingFinding[] {
-  const touches = touching(points);
+export function stayingFindings(
+  { panel, findings, scope }: ChecklistInput,
+  isolators: readonly string[],
+): StayingFinding[] {
   const byContent = new Map(
-    findings
-      .filter(({ where }) => touches(where))
-      .map((finding) => [
-        canonicalJson(finding),
-        { finding, name: `${finding.rule}.${placeOf(finding.where)}` },
-      ]),
+    findingsInScope(panel, findings, scope, isolators).map((finding) => [
+      canonicalJson(finding),
+      { finding, name: `${finding.rule}.${placeOf(finding.where)}` },
+    ]),
   );
   const counts = new Map<string, number>();
   return [...byContent]
