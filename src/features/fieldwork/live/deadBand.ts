@@ -8,6 +8,8 @@ export type DeadBand = 'dead' | 'not-dead' | 'live';
 const liveAboveV = { 'V AC': 25, 'V DC': 60 } as const;
 // isolation.md §3: a reading of 80 % of a supply means that the supply is still on, whatever the band.
 const stillOnShare = 0.8;
+// 0.8 × 24 is a hair above 19.2 in binary: a reading of exactly 80 % must count.
+const rounding = 1e-9;
 
 /** An unknown unit counts as the stricter one: a missing datum is never assumed safe. */
 export function deadBand(ask: ReadingAsk, value: number): DeadBand {
@@ -20,7 +22,9 @@ export function deadBand(ask: ReadingAsk, value: number): DeadBand {
 export function supplyStillOn(panel: Panel, ask: ReadingAsk, value: number): Supply | undefined {
   const V = Math.abs(value);
   const near = panel.supplies
-    .filter((supply) => (supply.kind === 'dc') === (ask.unit === 'V DC') && V >= stillOnShare * supply.V)
+    .filter(
+      (supply) => (supply.kind === 'dc') === (ask.unit === 'V DC') && V >= stillOnShare * supply.V - rounding,
+    )
     .sort((a, b) => Math.abs(a.V - V) - Math.abs(b.V - V));
   return near.find((supply) => supply.tag === ask.dead?.supply) ?? near[0];
 }
