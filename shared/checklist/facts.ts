@@ -32,6 +32,9 @@ export interface PointFacts {
   group: Group;
   module: Module;
   supply?: Supply;
+  /** Shared by every step of the point: a checklist holds tens of thousands of steps. */
+  where: { point: string; terminal: string };
+  loop: { kind: 'loop'; point: string };
 }
 
 export interface IsolatorFacts extends PlannedIsolator {
@@ -89,7 +92,10 @@ function pointsInScope({ panel, scope }: ChecklistInput): PointFacts[] {
     if (!group || !module)
       throw new Error(`point ${point.address} hangs on no group and module of the panel`);
     const supply = supplies.get(group.supply ?? '');
-    return [supply ? { point, group, module, supply } : { point, group, module }];
+    const where = { point: point.address, terminal: point.terminal };
+    const loop = { kind: 'loop' as const, point: point.address };
+    const worked = { point, group, module, where, loop };
+    return [supply ? { ...worked, supply } : worked];
   });
 }
 

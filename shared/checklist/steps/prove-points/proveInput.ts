@@ -27,9 +27,9 @@ export function proveInput(worked: PointFacts, stage: Stage): Step[] {
         common: group.terminal,
       }),
       warnings,
-      where: { point: address, terminal },
+      where: worked.where,
       ask,
-      picture: { kind: 'loop', point: address },
+      picture: worked.loop,
     });
   const reading = (window: Window): Ask => ({ kind: 'reading', unit, ...window });
   const drop = 'ratedmA' in io && io.ratedmA !== undefined ? cableDrop(point.cable, io.ratedmA / 1000) : 0;

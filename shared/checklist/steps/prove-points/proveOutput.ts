@@ -47,9 +47,9 @@ export function proveOutput(facts: Facts, worked: PointFacts, stage: Stage): Ste
       family: 'prove-output',
       title: say(`checklist.prove.output.${name}`, { device: deviceName(worked), address, terminal }),
       warnings: warned,
-      where: { point: address, terminal },
+      where: worked.where,
       ask,
-      picture: { kind: 'loop', point: address },
+      picture: worked.loop,
     });
   const reading = (window: Window): Ask => ({ kind: 'reading', unit, ...window });
   const drop = point.device.kind === 'load' ? cableDrop(point.cable, point.device.A) : 0;

@@ -5,9 +5,9 @@ import type { PointFacts } from '../../facts';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
 
-export function finish({ point }: PointFacts): Step[] {
+export function finish({ point, where }: PointFacts): Step[] {
   const { address, terminal, wire } = point;
-  const common = { stage: 'wire', family: 'finish', where: { point: address, terminal } } as const;
+  const common = { stage: 'wire', family: 'finish', where } as const;
   return [
     makeStep({
       ...common,

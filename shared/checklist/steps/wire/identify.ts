@@ -6,9 +6,9 @@ import { makeStep } from '../../makeStep';
 import { sizeText } from '../../sizes';
 import type { Step } from '../../types';
 
-export function identify({ point }: PointFacts): Step[] {
+export function identify({ point, where }: PointFacts): Step[] {
   const { address, terminal, wire, cable, description, device } = point;
-  const common = { stage: 'wire', family: 'identify', where: { point: address, terminal } } as const;
+  const common = { stage: 'wire', family: 'identify', where } as const;
   const seen = makeStep({
     ...common,
     id: `wire.${address}.identify`,

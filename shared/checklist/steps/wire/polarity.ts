@@ -40,9 +40,9 @@ export const polarity = (worked: PointFacts): Step[] => [
     family: 'polarity',
     title: say('checklist.wire.polarity', { terminal: worked.point.terminal }),
     detail: remarks(worked),
-    where: { point: worked.point.address, terminal: worked.point.terminal },
+    where: worked.where,
     ask: choice(['as-picture'], ['not-as-picture']),
-    picture: { kind: 'loop', point: worked.point.address },
+    picture: worked.loop,
   }),
   ...polarisedLoad(worked),
 ];

@@ -46,7 +46,7 @@ function readings(facts: Facts, worked: PointFacts, { name, terminal }: Conducto
         family: 'terminal-dead',
         title: say(`checklist.dead.read.${function_.toLowerCase()}`, { terminal, second }),
         detail: proves ? [] : [say('checklist.dead.proves-nothing', { supply })],
-        where: { point: address, terminal },
+        where: terminal === worked.point.terminal ? worked.where : { point: address, terminal },
         ask: deadReading(function_, facts.settings.deadLimitV, {
           supply,
           pair: `${terminal}/${second}`,
@@ -55,7 +55,7 @@ function readings(facts: Facts, worked: PointFacts, { name, terminal }: Conducto
           proves,
         }),
         personal: true,
-        picture: { kind: 'loop', point: address, mark: 'signal' },
+        picture: worked.loop,
       });
     }),
   );
