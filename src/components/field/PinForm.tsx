@@ -73,7 +73,7 @@ export function PinForm({ label, submit, check }: PinFormProps) {
       <NumberPad
         value={pin}
         decimal={false}
-        words={label}
+        words={t('field.reading.pad')}
         onChange={(value) => {
           setPin(value.replace(/\D/g, ''));
         }}

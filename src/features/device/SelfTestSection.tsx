@@ -6,7 +6,7 @@ import { useDeviceStore, useLocalJobs } from '../../offline/useDevice';
 import { Section } from './Section';
 
 function JobTest({ local }: { local: LocalJob }) {
-  const { t } = useWords();
+  const { t, say } = useWords();
   const store = useDeviceStore();
   const [readiness, setReadiness] = useState<Readiness>();
   const [busy, setBusy] = useState(false);
@@ -28,9 +28,9 @@ function JobTest({ local }: { local: LocalJob }) {
       </FieldButton>
       <div role="status">
         {readiness?.ready && <p className="m-0 font-bold">{t('field.ready.yes')}</p>}
-        {missing.map(({ check }) => (
+        {missing.map(({ check, says }) => (
           <p key={check} className="m-0">
-            {t(`field.ready.missing.${check}`)}
+            {say(says)}
           </p>
         ))}
       </div>

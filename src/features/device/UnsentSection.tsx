@@ -22,7 +22,7 @@ function saveFile(name: string, content: string) {
 
 /** What is not sent, since when, what the server said, and the two ways to bring it over: send, or a file. */
 export function UnsentSection() {
-  const { t, language } = useWords();
+  const { t, say, language } = useWords();
   const store = useDeviceStore();
   const send = useSendState();
   const [busy, setBusy] = useState(false);
@@ -40,7 +40,7 @@ export function UnsentSection() {
         <p className="m-0">{t('device.unsent.oldest', { since: at(send.oldestUnsentAt) })}</p>
       )}
       {send.lastSentAt && <p className="m-0">{t('device.unsent.last', { at: at(send.lastSentAt) })}</p>}
-      {send.lastError && <p className="m-0">{t('device.unsent.error', { says: send.lastError })}</p>}
+      {send.lastError && <p className="m-0">{t('device.unsent.error', { says: say(send.lastError) })}</p>}
       {send.needsAttention.map(({ entry, says }) => (
         <p key={entry} className="m-0 border-l-8 border-ink pl-2">
           {t('device.unsent.aside', { says })}

@@ -3,6 +3,7 @@ import { v7 } from 'uuid';
 import type { Pack } from '../../../shared/api/jobs';
 import type { BodyOf, Entry, EntryKind } from '../../../shared/job/entry';
 import { entryHash } from '../../../shared/job/entryBytes';
+import { say } from '../../../shared/panel/says';
 import type { JobFacts } from '../../../shared/job/types';
 import {
   NotSavedError,
@@ -109,11 +110,13 @@ export class MemoryStore implements DeviceStore {
         oldestUnsentAt: this.kept.entries[0]?.at ?? null,
         state: 'waiting',
         lastSentAt: null,
-        lastError: this.offlineSince ? 'no answer from the server' : null,
+        lastError: this.offlineSince ? say('app.unreachable') : null,
         needsAttention: [],
       };
     return this.sent;
   };
+  watch = () => () => undefined;
+  start = () => () => undefined;
   sendNow = () => Promise.resolve();
   people = () => Promise.resolve(this.persons);
   enrol = () => Promise.resolve();
@@ -122,7 +125,12 @@ export class MemoryStore implements DeviceStore {
   readiness = (): Promise<Readiness> =>
     Promise.resolve({
       ready: checks.every((check) => this.mended.has(check)),
-      checks: checks.map((check) => ({ check, ok: this.mended.has(check), says: check })),
+      checks: checks.map((check) => ({
+        check,
+        ok: this.mended.has(check),
+        says: say('field.job.missingWhy'),
+        button: say('field.jobs.look'),
+      })),
     });
   fix = (_job: string, check: ReadinessCheck) => {
     this.mended.add(check);

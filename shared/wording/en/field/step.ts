@@ -42,6 +42,8 @@ export const step = {
   'field.reading.save': '{reading}. Save',
   'field.reading.didYouMean': 'Did you mean {value} {unit}?',
   'field.reading.meter': 'meter {number}',
+  'field.reading.watched': 'I watched {name} measure {reading}',
+  'field.reading.watchedPin': 'You saw {name} touch this terminal and read {reading}.',
   'field.out.found': 'You found: {found}. That is outside.',
   'field.out.limits': 'It must be {limits}.',
   'field.out.do': 'Your answer is kept. Find out why before you go on.',

@@ -42,6 +42,8 @@ export const step = {
   'field.reading.save': '{reading}. Guardar',
   'field.reading.didYouMean': '¿Quiso decir {value} {unit}?',
   'field.reading.meter': 'aparato {number}',
+  'field.reading.watched': 'Vi a {name} medir {reading}',
+  'field.reading.watchedPin': 'Vio a {name} tocar este borne y leer {reading}.',
   'field.out.found': 'Encontró: {found}. Está fuera.',
   'field.out.limits': 'Debe ser {limits}.',
   'field.out.do': 'Su respuesta queda guardada. Busque la causa antes de seguir.',

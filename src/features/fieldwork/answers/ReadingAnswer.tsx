@@ -12,6 +12,7 @@ import { limitWords, readingWords, unitSign } from '../step/unitWords';
 import { useAnswer } from '../step/useAnswer';
 import { meterOf } from './meterOf';
 import { SaveButton } from './SaveButton';
+import { WatchedReadings } from './WatchedReadings';
 import type { StepOf } from './StepAnswer';
 
 function DidYouMean({ value, unit, onTake }: { value: number; unit: string; onTake: () => void }) {
@@ -47,7 +48,7 @@ function LimitLine({ id, step }: { id: string; step: StepOf<'reading'> }) {
 export function ReadingAnswer({ step }: { step: StepOf<'reading'> }) {
   const { t } = useWords();
   const { plain } = useFieldJob();
-  const { answer, saving, failed } = useAnswer(step);
+  const { answer, watch, saving, failed } = useAnswer(step);
   const [typed, setTyped] = useState('');
   const limitId = useId();
   const { ask } = step;
@@ -82,6 +83,7 @@ export function ReadingAnswer({ step }: { step: StepOf<'reading'> }) {
               }}
             />
           )}
+          <WatchedReadings step={step} onWatched={watch} />
           <NumberPad
             value={typed}
             onChange={setTyped}

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { useEffect, useMemo } from 'react';
 import { Outlet, useParams } from 'react-router-dom';
 import { paths } from '../../../app/paths';
 import { FieldLink } from '../../../components/field/FieldButton';
@@ -6,7 +6,7 @@ import { FieldPage } from '../../../components/field/FieldPage';
 import { useHere } from '../../../components/field/here';
 import { TitleStrip } from '../../../components/field/TitleStrip';
 import { useWords } from '../../../components/words';
-import { useLocalJob } from '../../../offline/useDevice';
+import { useDeviceStore, useLocalJob } from '../../../offline/useDevice';
 import { UnsentLine } from '../layout/UnsentLine';
 import { fieldJobOf } from './fieldJobOf';
 import { FieldJobContext } from './useFieldJob';
@@ -32,7 +32,9 @@ export function JobLayout() {
   const { job: id = '' } = useParams();
   const here = useHere();
   const { language } = useWords();
+  const store = useDeviceStore();
   const local = useLocalJob(id);
+  useEffect(() => store.watch(id), [store, id]);
   const job = useMemo(
     () => (local && here ? fieldJobOf(local, here, language) : undefined),
     [local, here, language],

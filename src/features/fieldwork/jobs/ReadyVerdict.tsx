@@ -1,7 +1,7 @@
 import { FieldButton, FieldLink } from '../../../components/field/FieldButton';
 import { paths } from '../../../app/paths';
 import { useWords } from '../../../components/words';
-import type { ReadinessCheck } from '../../../offline/types';
+import type { Readiness } from '../../../offline/types';
 import { useReadiness } from './useReadiness';
 
 function Mark({ ok }: { ok: boolean }) {
@@ -18,36 +18,47 @@ function Mark({ ok }: { ok: boolean }) {
   );
 }
 
+type Check = Readiness['checks'][number];
+
+function Missing({ check, mending, onMend }: { check: Check; mending: boolean; onMend: () => void }) {
+  const { t, say } = useWords();
+  return (
+    <div className="grid gap-1">
+      <p className="m-0 leading-snug">{say(check.says)}</p>
+      {check.check === 'pin' ? (
+        <FieldLink to={paths.device}>{check.button ? say(check.button) : t('field.thisDevice')}</FieldLink>
+      ) : (
+        check.button && (
+          <FieldButton disabled={mending} aria-busy={mending} onClick={onMend}>
+            {mending ? t('field.ready.mending') : say(check.button)}
+          </FieldButton>
+        )
+      )}
+    </div>
+  );
+}
+
 /** "Works with no signal", or what is missing, each with the button that mends it. */
 export function ReadyVerdict({ job }: { job: string }) {
   const { t } = useWords();
   const { readiness, mending, mend } = useReadiness(job);
   if (!readiness) return <p className="m-0 min-h-7 text-muted">{t('field.ready.looking')}</p>;
-  const missing = readiness.checks.filter(({ ok }) => !ok);
-  const fix = (check: ReadinessCheck) =>
-    check === 'pin' ? (
-      <FieldLink to={paths.device}>{t('field.ready.fix.pin')}</FieldLink>
-    ) : (
-      <FieldButton
-        disabled={mending !== undefined}
-        aria-busy={mending === check}
-        onClick={() => void mend(check)}
-      >
-        {t(mending === check ? 'field.ready.mending' : `field.ready.fix.${check}`)}
-      </FieldButton>
-    );
   return (
     <div role="status" className="grid gap-2">
       <p className="m-0 flex items-center gap-2 font-bold">
         <Mark ok={readiness.ready} />
         {t(readiness.ready ? 'field.ready.yes' : 'field.ready.no')}
       </p>
-      {missing.map(({ check }) => (
-        <div key={check} className="grid gap-1">
-          <p className="m-0 leading-snug">{t(`field.ready.missing.${check}`)}</p>
-          {fix(check)}
-        </div>
-      ))}
+      {readiness.checks
+        .filter(({ ok }) => !ok)
+        .map((check) => (
+          <Missing
+            key={check.check}
+            check={check}
+            mending={mending === check.check}
+            onMend={() => void mend(check.check)}
+          />
+        ))}
     </div>
   );
 }

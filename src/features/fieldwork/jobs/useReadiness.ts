@@ -16,7 +16,8 @@ export function useReadiness(job: string): {
   }, [store, job]);
   useEffect(() => {
     void look();
-  }, [look]);
+    return store.subscribe(() => void look());
+  }, [store, look]);
   const mend = async (check: ReadinessCheck) => {
     setMending(check);
     try {

@@ -26,7 +26,7 @@ function pathFeeder(panel: Panel, live: Live, locked: ReadonlySet<string>): Feed
 
 /** Everything `reach` finds live at the terminal, or at the supply it belongs to, with these isolators open. */
 function livePaths(panel: Panel, dead: NonNullable<ReadingAsk['dead']>, open: ReadonlySet<string>): Live[] {
-  const { terminals, supplies } = reach(panel, new Set(open));
+  const { terminals, supplies } = reach(panel, open);
   const found = [terminals.get(dead.terminal), terminals.get(dead.second), supplies.get(dead.supply)];
   const paths = new Map(found.flatMap((live) => (live ? [[live.path.join(' '), live] as const] : [])));
   return [...paths.values()];

@@ -18,6 +18,8 @@ const shownLength = 2000;
 interface Answering extends Omit<Save, 'save'> {
   /** Saves an answer to this step and goes on when it is kept and in limits. */
   answer: (value: AnswerValue) => Promise<unknown>;
+  /** The same for a reading that this person watched another take: names that answer, and takes the PIN. */
+  watch: (value: AnswerValue, watched: string, pinWhy: string) => Promise<unknown>;
   /** The same for the steps whose answer is an entry of its own kind (locks, closing). */
   act: <K extends EntryKind>(kind: K, body: BodyOf<K>, pinWhy?: string) => Promise<unknown>;
 }
@@ -52,6 +54,8 @@ export function useAnswer(step: Step): Answering {
   return {
     act,
     answer: (value) => act('answer', { step: step.id, value, shown, language }),
+    watch: (value, watched, pinWhy) =>
+      act('answer', { step: step.id, value, shown, language, watched }, pinWhy),
     saving,
     failed,
   };
