@@ -90,7 +90,7 @@ export const recordDocument = z.object({
       words: z.string(),
       person: z.string(),
       at: instant,
-      decision: z.string().nullable(),
+      decision: z.enum(['rework', 'accept', 'out-of-scope']).nullable(),
       decidedBy: z.string().nullable(),
       decidedWords: z.string().nullable(),
     }),

@@ -19,7 +19,8 @@ interface RequestOptions {
 }
 
 /** The sender also runs where there is no document (a worker, a test). */
-const screenLanguage = (): string => (typeof document === 'undefined' ? 'en' : document.documentElement.lang || 'en');
+const screenLanguage = (): string =>
+  typeof document === 'undefined' ? 'en' : document.documentElement.lang || 'en';
 
 async function problemOf(response: Response): Promise<Problem> {
   const parsed = problem.safeParse(await response.json().catch(() => null));

@@ -30,9 +30,51 @@ const plainPages: RouteObject[] = [
     paths.passwordReset,
     async () => (await import('../features/session/PasswordResetPage')).PasswordResetPage,
   ),
+  page(paths.verify, async () => (await import('../features/records/VerifyPage')).VerifyPage),
 ];
 
-const officePages: RouteObject[] = [];
+const officePages: RouteObject[] = [
+  page(paths.jobs, async () => (await import('../features/jobs/JobsPage')).JobsPage, 'foreman'),
+  page(paths.newJob, async () => (await import('../features/jobs/NewJobPage')).NewJobPage, 'foreman'),
+  page(paths.job(':job'), async () => (await import('../features/jobs/JobPage')).JobPage, 'foreman'),
+  page(
+    paths.panels,
+    async () => (await import('../features/panels/PanelsPage')).PanelsPage,
+    'panel-engineer',
+    'foreman',
+  ),
+  page(
+    paths.panel(':panel'),
+    async () => (await import('../features/panels/PanelPage')).PanelPage,
+    'panel-engineer',
+    'foreman',
+  ),
+  page(
+    '/panels/:panel/revisions/:revision',
+    async () => (await import('../features/panels/RevisionPage')).RevisionPage,
+    'panel-engineer',
+    'foreman',
+  ),
+  page(
+    paths.records,
+    async () => (await import('../features/records/RecordsPage')).RecordsPage,
+    'safety-officer',
+    'foreman',
+  ),
+  page(
+    paths.record(':record'),
+    async () => (await import('../features/records/RecordPage')).RecordPage,
+    'safety-officer',
+    'foreman',
+  ),
+  page(paths.people, async () => (await import('../features/people/PeoplePage')).PeoplePage, 'administrator'),
+  page(paths.sites, async () => (await import('../features/sites/SitesPage')).SitesPage, 'administrator'),
+  page(
+    paths.site(':site'),
+    async () => (await import('../features/sites/SitePage')).SitePage,
+    'administrator',
+  ),
+];
 
 /** The office: each page and both frames load on their own, so the field never carries them. */
 export const officeRoutes: RouteObject[] = [

@@ -12,13 +12,18 @@ export function ChecksRun({ checks, couldNotRun, found }: ChecksRunProps) {
   return (
     <details>
       <summary className="min-h-11 cursor-pointer content-center font-bold">{counts}</summary>
-      <ul className="m-0 max-h-80 list-none overflow-auto border border-rule p-3" tabIndex={0} aria-label={counts}>
+      <ul
+        className="m-0 max-h-80 list-none overflow-auto border border-rule p-3"
+        tabIndex={0}
+        aria-label={counts}
+      >
         {couldNotRun.map((each, index) => (
           <li key={index} className="flex flex-wrap items-center gap-x-2 py-0.5">
             <code className="font-mono text-sm">{each.rule}</code>
             <WhereTags where={each.where} />
             <span>
-              {t('office.checks.missing')} <code className="font-mono text-sm wrap-anywhere">{each.missing}</code>
+              {t('office.checks.missing')}{' '}
+              <code className="font-mono text-sm wrap-anywhere">{each.missing}</code>
             </span>
           </li>
         ))}

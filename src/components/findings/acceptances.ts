@@ -29,5 +29,9 @@ export const acceptancesOf = (findings: readonly Placed[], reasons: Reasons): Ac
   acceptanceGroups(findings).flatMap(({ first }) => {
     const reason = reasons[acceptanceKey(first)]?.trim();
     if (!reason) return [];
-    return [first.harm === 'doubt' ? { rule: first.rule, reason } : { rule: first.rule, place: first.place, reason }];
+    return [
+      first.harm === 'doubt'
+        ? { rule: first.rule, reason }
+        : { rule: first.rule, place: first.place, reason },
+    ];
   });

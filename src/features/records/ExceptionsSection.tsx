@@ -1,0 +1,52 @@
+import type { RecordDocument } from '../../../shared/api/recordDocument';
+import { Moment } from '../../components/Moment';
+import { SheetSection } from '../../components/sheet/SheetSection';
+import { useWords } from '../../components/words';
+
+/** What did not go as planned: findings that stood, holds with their decision, later rounds. */
+export function ExceptionsSection({ document }: { document: RecordDocument }) {
+  const { t } = useWords();
+  const rounds = document.rounds.filter((round) => round.number > 1);
+  const none = document.findings.length + document.holds.length + rounds.length === 0;
+  return (
+    <SheetSection title={t('records.exceptions')}>
+      {none && <p className="m-0">{t('records.exceptions.none')}</p>}
+      <ul className="m-0 list-none p-0">
+        {rounds.map((round) => (
+          <li key={round.number} className="border-b border-rule py-2">
+            <strong>{t('records.roundN', { n: round.number })}</strong> {round.words} (
+            {round.points.join(', ')}). {round.person}, <Moment at={round.at} form="exact" />
+          </li>
+        ))}
+        {document.holds.map((hold) => (
+          <li key={`${hold.step} ${hold.at}`} className="border-b border-rule py-2">
+            <strong>{t('records.hold')}</strong> {hold.shown}: {hold.words}. {hold.person},{' '}
+            <Moment at={hold.at} form="exact" />
+            <span className="block">
+              {hold.decidedBy === null
+                ? t('records.hold.undecided')
+                : t('records.hold.decided', {
+                    name: hold.decidedBy,
+                    decision: hold.decision === null ? '' : t(`records.decision.${hold.decision}`),
+                    words: hold.decidedWords ?? '',
+                  })}
+            </span>
+          </li>
+        ))}
+        {document.findings.map((finding) => (
+          <li key={`${finding.rule} ${finding.place}`} className="border-b border-rule py-2">
+            <code className="font-mono text-sm">
+              {finding.rule} {finding.place}
+            </code>{' '}
+            {finding.says}
+            {finding.accepted && (
+              <span className="block">
+                {t('office.acceptedBy', { name: finding.accepted.by, reason: finding.accepted.reason })}
+              </span>
+            )}
+          </li>
+        ))}
+      </ul>
+    </SheetSection>
+  );
+}
