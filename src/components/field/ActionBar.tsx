@@ -6,7 +6,7 @@ export function ActionBar({ primary, children }: { primary?: ReactNode; children
     <div className="grid gap-2 border-t-2 border-ink bg-sheet px-3 py-2.5">
       {primary}
       {children && (
-        <div className="flex gap-2 text-[1rem] [&>:is(a,button)]:flex-auto [&>:is(a,button)]:px-1.5">
+        <div className="flex flex-wrap gap-2 text-[1rem] [&>:is(a,button)]:flex-auto [&>:is(a,button)]:px-1.5">
           {children}
         </div>
       )}

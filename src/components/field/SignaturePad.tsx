@@ -75,7 +75,7 @@ export function SignaturePad({ label, strokes, onChange }: SignaturePadProps) {
         aria-label={label}
         className="h-44 w-full touch-none border-[3px] border-ink bg-sheet text-ink landscape:h-[min(11rem,50dvh)]"
       />
-      <div className="flex gap-2 [&>*]:flex-1">
+      <div className="flex flex-wrap gap-2 [&>*]:flex-1">
         <FieldButton
           disabled={strokes.length === 0}
           onClick={() => {

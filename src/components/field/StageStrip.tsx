@@ -14,7 +14,7 @@ function Terminal({ cell, number }: { cell: StageCell; number: number }) {
   const fill = cell.status === 'done' ? 'bg-ink text-paper' : 'bg-sheet text-ink';
   return (
     <span
-      className={`flex min-w-0 flex-1 items-center justify-center border-ink font-mono text-[0.68rem] font-bold not-first:border-l ${fill}`}
+      className={`stage-other flex min-w-0 flex-1 items-center justify-center border-ink font-mono text-[0.68rem] font-bold not-first:border-l ${fill}`}
     >
       {number}
     </span>

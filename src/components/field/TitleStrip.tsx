@@ -12,7 +12,7 @@ export interface TitleCell {
 export function TitleStrip({ cells, end }: { cells: TitleCell[]; end?: ReactNode }) {
   return (
     <div className="flex items-stretch border-b-2 border-ink bg-paper">
-      <dl className="m-0 flex min-w-0 flex-1 items-stretch">
+      <dl className="title-cells m-0 flex min-w-0 flex-1 items-stretch">
         {cells.map((cell, index) => (
           <div
             key={cell.label}

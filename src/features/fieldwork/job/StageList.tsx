@@ -16,7 +16,7 @@ export function StageList() {
     <section aria-label={t('field.job.stages')}>
       <ol className="m-0 grid list-none border-2 border-ink p-0">
         {state.stages.map(({ stage, status, done, of }, index) => (
-          <li key={stage} className="flex min-h-9 border-ink leading-tight not-first:border-t">
+          <li key={stage} className="stage-row flex min-h-9 border-ink leading-tight not-first:border-t">
             <span
               className={`flex w-10 shrink-0 items-center justify-center font-mono font-bold ${fills[status]}`}
             >

@@ -24,12 +24,22 @@ function pathFeeder(panel: Panel, live: Live, locked: ReadonlySet<string>): Feed
   return { why: 'path', path: live.path, maybe: live.maybe, ...(open ? { open } : {}) };
 }
 
+const startsWith = (path: string[], start: string[]): boolean =>
+  start.every((tag, index) => path[index] === tag);
+
 /** Everything `reach` finds live at the terminal, or at the supply it belongs to, with these isolators open. */
 function livePaths(panel: Panel, dead: NonNullable<ReadingAsk['dead']>, open: ReadonlySet<string>): Live[] {
   const { terminals, supplies } = reach(panel, open);
   const found = [terminals.get(dead.terminal), terminals.get(dead.second), supplies.get(dead.supply)];
-  const paths = new Map(found.flatMap((live) => (live ? [[live.path.join(' '), live] as const] : [])));
-  return [...paths.values()];
+  const lives = found.flatMap((live) => live ?? []);
+  // A path that another one continues, or repeats, says nothing of its own.
+  return lives.filter(
+    ({ path }, index) =>
+      !lives.some(
+        (other, at) =>
+          at !== index && startsWith(other.path, path) && (other.path.length > path.length || at < index),
+      ),
+  );
 }
 
 /** The isolators that would feed the terminal if they were not open: reach with none open names them. */
