@@ -1,6 +1,6 @@
 /** Jobs, packs, entries, devices and keys. */
 import { z } from 'zod';
-import type { Checklist } from '../checklist/types';
+import { stages, type Checklist } from '../checklist/types';
 import type { Finding } from '../rules/finding';
 import type { LockPlan, StillLive, Wait } from '../isolation/types';
 import type { Panel } from '../panel/panelSchema';
@@ -134,6 +134,40 @@ export const jobView = jobRow.extend({
   cancelled: z.object({ at: instant, by: z.string(), words: z.string() }).nullable(),
 });
 export type JobView = z.infer<typeof jobView>;
+
+/** `GET /api/jobs/:id/state`: the job folded from what the server has heard, in the language asked for. */
+export const jobStateView = z.object({
+  round: z.int(),
+  stages: z.array(
+    z.object({
+      stage: z.enum(stages),
+      status: z.enum(['done', 'current', 'locked', 'open']),
+      done: z.int(),
+      of: z.int(),
+    }),
+  ),
+  steps: z.array(
+    z.object({
+      id: z.string(),
+      stage: z.enum(stages),
+      title: z.string(),
+      status: z.enum(['open', 'done', 'held', 'out', 'two-answers', 'out-of-scope', 'accepted']),
+      /** Newest last; `found` is the answer in words or as a reading with its unit. */
+      answers: z.array(
+        z.object({
+          person: z.string(),
+          at: instant,
+          found: z.string(),
+          verdict: z.enum(['ok', 'out', 'refused']),
+          round: z.int(),
+        }),
+      ),
+      hold: z.object({ person: z.string(), at: instant, words: z.string() }).nullable(),
+      returned: z.string().nullable(),
+    }),
+  ),
+});
+export type JobStateView = z.infer<typeof jobStateView>;
 
 export interface PackPerson {
   id: string;
