@@ -1,7 +1,7 @@
 import { useInfiniteQuery, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { z } from 'zod';
 import type { Language } from '../../shared/api/common';
-import { jobPreview, jobsPage, jobView, type JobRequest } from '../../shared/api/jobs';
+import { jobPreview, jobsPage, jobStateView, jobView, type JobRequest } from '../../shared/api/jobs';
 import { nextPage } from './nextPage';
 import { request } from './request';
 
@@ -77,3 +77,11 @@ export function useCancelJob(job: string) {
     onSuccess,
   });
 }
+
+/** The steps with their answers, as the server has heard them. */
+export const useJobState = (job: string, language: Language) =>
+  useQuery({
+    queryKey: ['job', job, 'state', language],
+    queryFn: ({ signal }) => request(jobStateView, `/api/jobs/${job}/state`, { signal, timeoutMs: 60_000 }),
+    refetchInterval: pollMs,
+  });

@@ -17,10 +17,13 @@ export function Dialog({ open, title, onClose, actions, closeWords, children }: 
   const { t } = useWords();
   const titleId = useId();
   const element = useRef<HTMLDialogElement>(null);
+  const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => {
     const dialog = element.current;
     if (!dialog || !open) return;
     dialog.showModal();
+    // The title first: a field further down would scroll past what has to be read before it.
+    heading.current?.focus();
     return () => dialog.close();
   }, [open]);
   if (!open) return null;
@@ -34,7 +37,12 @@ export function Dialog({ open, title, onClose, actions, closeWords, children }: 
       }}
       className="m-auto max-h-[90dvh] w-[min(44rem,calc(100vw-1rem))] overflow-auto border-2 border-ink bg-sheet p-0 text-ink backdrop:bg-ink/50"
     >
-      <h2 id={titleId} className="m-0 border-b-2 border-ink px-5 py-3 text-xl font-bold">
+      <h2
+        ref={heading}
+        tabIndex={-1}
+        id={titleId}
+        className="m-0 outline-none border-b-2 border-ink px-5 py-3 text-xl font-bold"
+      >
         {title}
       </h2>
       <div className="px-5 py-4">{children}</div>

@@ -143,7 +143,7 @@ export const office = {
   'office.job.steps.step': 'Step',
   'office.job.steps.status': 'Status',
   'office.job.steps.answer': 'Answer',
-  'office.job.steps.who': 'Who and when',
+  'office.step.returned': 'Returned: {words}',
   'office.step.open': 'open',
   'office.step.done': 'done',
   'office.step.held': 'held',

@@ -145,7 +145,7 @@ export const office = {
   'office.job.steps.step': 'Paso',
   'office.job.steps.status': 'Estado',
   'office.job.steps.answer': 'Respuesta',
-  'office.job.steps.who': 'Quién y cuándo',
+  'office.step.returned': 'Devuelto: {words}',
   'office.step.open': 'abierto',
   'office.step.done': 'hecho',
   'office.step.held': 'retenido',

@@ -38,10 +38,12 @@ export function SheetPage({ title, titleHidden, cells, page, asOf, actions, chil
   ];
   return (
     <>
-      <main id="main" tabIndex={-1} className="flex-1 px-4 py-5 outline-none md:px-6">
-        <div
-          className={titleHidden && !actions ? '' : 'mb-4 flex flex-wrap items-center justify-between gap-3'}
-        >
+      <main
+        id="main"
+        tabIndex={-1}
+        className="flex-1 px-4 py-5 outline-none md:px-6 [&_a:not([class*=rounded])]:underline [&_a]:underline-offset-4"
+      >
+        <div className={titleHidden ? 'float-right ml-4' : 'mb-4 flex flex-wrap items-center gap-3'}>
           <h1 className={titleHidden ? 'sr-only' : 'm-0 text-2xl font-bold'}>{title}</h1>
           {actions && <div className="ml-auto flex flex-wrap gap-3">{actions}</div>}
         </div>

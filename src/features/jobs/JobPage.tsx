@@ -11,6 +11,7 @@ import { useWords } from '../../components/words';
 import { CancelJob } from './CancelJob';
 import { JobDetails } from './JobDetails';
 import { LastHeard, LocksOn, Progress, WaitingFor } from './JobCells';
+import { JobSteps } from './JobSteps';
 import { SendButton } from './SendButton';
 
 /** One job as the server has heard it. */
@@ -78,6 +79,7 @@ function JobSheet({ job, asOf }: { job: JobView; asOf: number }) {
           ))}
         </p>
       </SheetSection>
+      {job.pack !== null && <JobSteps job={job.id} />}
     </SheetPage>
   );
 }

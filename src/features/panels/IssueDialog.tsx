@@ -52,7 +52,7 @@ export function IssueDialog({ panel, findings, onClose }: IssueDialogProps) {
       <IssueBlocked problems={findings.problems} findings={findings.findings} />
       {toAccept.length > 0 && !blocked && (
         <>
-          <h3 className="mb-1 text-lg font-bold">{t('office.accept.title')}</h3>
+          <h3 className="mt-5 mb-1 text-lg font-bold">{t('office.accept.title')}</h3>
           <AcceptFindings
             findings={toAccept}
             reasons={reasons}

@@ -33,7 +33,7 @@ export const emptySite: SiteValues = {
   emergencyNumber: '',
   musterPoint: '',
   foremanPhone: '',
-  deadLimitV: '1',
+  deadLimitV: '1.0',
   permitAsked: false,
   ferruleScheme: 'DIN 46228-4',
   instruments: [],
@@ -43,7 +43,9 @@ export const siteValues = ({ name, settings }: SiteView): SiteValues => ({
   ...settings,
   name,
   foremanPhone: settings.foremanPhone ?? '',
-  deadLimitV: String(settings.deadLimitV),
+  deadLimitV: Number.isInteger(settings.deadLimitV)
+    ? settings.deadLimitV.toFixed(1)
+    : String(settings.deadLimitV),
   instruments: settings.instruments.map((each) => ({ ...each, ratedV: String(each.ratedV) })),
 });
 
