@@ -9,8 +9,11 @@ import { fieldRoutes } from '../../../src/features/fieldwork/routes';
 import { DeviceProvider } from '../../../src/offline/useDevice';
 import { MemoryStore } from './MemoryStore';
 import { electrician, foreman, samplePack } from './samplePack';
+import { smallPack } from './smallPack';
 
-const store = new MemoryStore(samplePack, [electrician, foreman]);
+// localStorage.setItem('harness.pack', 'small') shows the generator's own steps.
+const pack = localStorage.getItem('harness.pack') === 'small' ? smallPack() : samplePack;
+const store = new MemoryStore(pack, [electrician, foreman]);
 Object.assign(window, { harness: store });
 const router = createBrowserRouter([...fieldRoutes, ...deviceRoutes]);
 

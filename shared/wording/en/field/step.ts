@@ -63,7 +63,7 @@ export const step = {
   'field.round.words': 'What is wrong?',
   'field.round.start':
     '{n, plural, =0 {Tick a point first} one {Start the round for # point} other {Start the round for # points}}',
-  'field.choice.found': 'What did you find?',
+  'field.choice.found': 'What is true?',
   'field.choice.choose': 'Choose one',
   'field.text.yours': 'Your answer',
   'field.scan.type': 'Type the tag you read',

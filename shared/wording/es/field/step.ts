@@ -63,7 +63,7 @@ export const step = {
   'field.round.words': '¿Qué está mal?',
   'field.round.start':
     '{n, plural, =0 {Marque antes un punto} one {Empezar la vuelta con # punto} other {Empezar la vuelta con # puntos}}',
-  'field.choice.found': '¿Qué encontró?',
+  'field.choice.found': '¿Qué es cierto?',
   'field.choice.choose': 'Elija una',
   'field.text.yours': 'Su respuesta',
   'field.scan.type': 'Escriba la etiqueta que lee',

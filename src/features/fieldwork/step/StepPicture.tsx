@@ -1,11 +1,20 @@
+import { lazy, Suspense } from 'react';
 import type { Step } from '../../../../shared/checklist/types';
 import { LoopDiagram } from '../../../diagrams/LoopDiagram';
 import { useFieldJob } from '../job/useFieldJob';
 import { LocksPicture } from '../locks/LocksPicture';
 
-/** The computed picture of a step: the loop of its point with the conductor in question thick, or the isolators in order. */
+const Summary = lazy(async () => ({ default: (await import('../sign/Summary')).Summary }));
+
+/** The computed picture of a step: the loop of its point with the conductor in question thick, the isolators in order, or what is to be signed. */
 export function StepPicture({ step }: { step: Step }) {
   const { pack } = useFieldJob();
+  if (step.stage === 'sign')
+    return (
+      <Suspense>
+        <Summary />
+      </Suspense>
+    );
   if (!step.picture) return null;
   if (step.picture.kind === 'energy') return <LocksPicture isolator={step.where?.isolator} />;
   const { point, mark } = step.picture;

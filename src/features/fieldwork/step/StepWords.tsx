@@ -46,14 +46,14 @@ export function StepWords({ step }: { step: Step }) {
         </h1>
       </div>
       <StepStanding step={step} />
-      {step.warnings?.map((warning) => (
-        <SignalBox key={warning.says.key} signal={warning.signal}>
+      {step.warnings?.map((warning, index) => (
+        <SignalBox key={index} signal={warning.signal}>
           <MarkedText text={marked(warning.says)} look="bold" />
         </SignalBox>
       ))}
       <StepPicture step={step} />
-      {step.detail?.map((detail) => (
-        <p key={detail.key} className="m-0 leading-snug">
+      {step.detail?.map((detail, index) => (
+        <p key={index} className="m-0 leading-snug">
           <MarkedText text={marked(detail)} look="bold" />
         </p>
       ))}
