@@ -65,7 +65,9 @@ export type Pair =
   | 'L3/PE'
   | 'L1/N'
   | 'L2/N'
-  | 'L3/N';
+  | 'L3/N'
+  // A terminal on a pole that the file does not name, against each pole there is.
+  | `?/${'+' | '0 V' | 'L' | 'N' | 'L1' | 'L2' | 'L3' | 'PE'}`;
 
 export interface DeadTest {
   /** Stable: `dead.<supply|group|point tag>.<pair with - for />`. */
@@ -79,6 +81,8 @@ export interface DeadTest {
   limitV: number;
   /** False for a pair to PE on an unearthed supply: it proves nothing, the step says so. */
   proves: boolean;
+  /** A terminal of a point in scope: it can be read as the first step of that point. */
+  worked?: boolean;
 }
 
 export interface Wait {

@@ -1,0 +1,60 @@
+/** How long stored charge needs before anyone may come near, supply by supply. */
+import type { Panel, Supply } from '../panel/panelSchema';
+import { dischargeSeconds } from './dischargeSeconds';
+import { asRead } from './inOrder';
+import type { Wait } from './types';
+import { workedTerminals } from './workedTerminals';
+
+// IEC 60204-1 6.2.4: live parts are to be at 60 V or less.
+const mayApproachV = 60;
+// The limit of a dead reading (common practice, no source).
+const expectedToPassV = 1;
+// Electrolytic capacitors are sold at −20/+20 % (common practice, no source).
+const capacitanceHigh = 1.2;
+
+/** Highest volts of a supply; null without a tolerance, which nobody may guess. */
+const highest = (supply: Supply): number | null =>
+  supply.tolerance ? supply.V * (1 + supply.tolerance.maxPct / 100) : null;
+
+/** Volts on the AC side of a rectifier: the AC supplies that feed it, each at its highest. */
+function rectifiedFrom(panel: Panel, supply: Supply): (number | null)[] {
+  if (supply.kind !== 'dc') return [highest(supply)];
+  return supply.feeds.flatMap((feed) => {
+    const feeders = panel.supplies.filter((one) => one.tag === feed.from && one.kind !== 'dc');
+    // Straight from a source: its tolerance is not in the file, so its highest is not known.
+    return feeders.length > 0 ? feeders.map(highest) : [null];
+  });
+}
+
+function startVolts(panel: Panel, supply: Supply): number | null {
+  const rectified = supply.bulk !== 'none' && supply.bulk.rectified === true;
+  const volts = rectified ? rectifiedFrom(panel, supply) : [highest(supply)];
+  const known = volts.filter((one) => one !== null);
+  if (known.length === 0 || known.length < volts.length) return null;
+  return Math.max(...known) * (rectified ? Math.SQRT2 : 1);
+}
+
+/** The wait of one supply with stored charge; null for a supply that stores none. */
+export function waitOf(panel: Panel, supply: Supply): Wait | null {
+  const { bulk } = supply;
+  if (bulk === 'none') return null;
+  const startV = startVolts(panel, supply);
+  const seconds = (endV: number): number | null =>
+    startV === null || bulk.bleedOhm === undefined
+      ? null
+      : dischargeSeconds(bulk.bleedOhm, bulk.uF * 1e-6 * capacitanceHigh, startV, endV);
+  const wait = { supply: supply.tag, t60S: seconds(mayApproachV), t1S: seconds(expectedToPassV) };
+  return bulk.dischargeS === undefined ? wait : { ...wait, statedS: bulk.dischargeS };
+}
+
+/**
+ * One wait for every worked supply with stored charge. A time is null when the file cannot tell it: then it is
+ * measured and none is promised (unless the maker's stands in `statedS`).
+ */
+export function waits(panel: Panel, scope: readonly string[]): Wait[] {
+  const worked = new Set(workedTerminals(panel, scope).supplies);
+  return [...panel.supplies]
+    .filter((supply) => worked.has(supply.tag))
+    .sort((a, b) => asRead(a.tag, b.tag))
+    .flatMap((supply) => waitOf(panel, supply) ?? []);
+}
