@@ -78,6 +78,8 @@ export const step = {
   'field.lockOn.save': 'Lock {lock} is on {isolator}',
   'field.lockOn.elsewhere':
     'Lock {lock} is on {isolator} already. Read the number again, or use another lock.',
+  'field.lockOn.replace':
+    'You entered lock {lock} on {isolator} before. It comes off the list; lock {now} goes on.',
   'field.lockOff.yours': 'Your lock here:',
   'field.lockOff.none': 'This phone knows no lock of yours on {isolator}.',
   'field.lockOff.save': 'Lock {lock} is off {isolator}',

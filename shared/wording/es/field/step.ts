@@ -78,6 +78,8 @@ export const step = {
   'field.lockOn.save': 'El candado {lock} está en {isolator}',
   'field.lockOn.elsewhere':
     'El candado {lock} ya está en {isolator}. Lea otra vez el número o use otro candado.',
+  'field.lockOn.replace':
+    'Antes anotó el candado {lock} en {isolator}. Sale de la lista; entra el candado {now}.',
   'field.lockOff.yours': 'Su candado aquí:',
   'field.lockOff.none': 'Este teléfono no conoce ningún candado suyo en {isolator}.',
   'field.lockOff.save': 'El candado {lock} está fuera de {isolator}',
