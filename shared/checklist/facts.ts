@@ -57,6 +57,8 @@ export interface Facts extends ChecklistInput {
   worked: (address: string) => PointFacts | undefined;
   /** The terminals beside a terminal of a module in scope. */
   beside: (module: string, terminal: string) => string[];
+  /** Dead tests at the terminals of a point. */
+  testsAt: (address: string) => readonly DeadTest[];
   /** Terminals that the stage Prove dead reads by name. */
   provedDead: ReadonlySet<string>;
   /** Findings that touch the scope, in a stable order. */
@@ -116,6 +118,9 @@ export function factsOf(input: ChecklistInput): Facts {
     isolators.map(({ isolator }) => isolator.tag),
   );
   const seeds = stays.flatMap((finding) => (finding.addsSteps ?? []).map((seed) => ({ ...seed, finding })));
+  const tests = new Map<string, DeadTest[]>();
+  for (const test of input.deadTests)
+    if ('point' in test.at) tests.set(test.at.point, [...(tests.get(test.at.point) ?? []), test]);
   const byFamily = new Map<string, typeof seeds>();
   for (const seed of seeds) byFamily.set(seed.family, [...(byFamily.get(seed.family) ?? []), seed]);
   return {
@@ -127,6 +132,7 @@ export function factsOf(input: ChecklistInput): Facts {
     isolators,
     supply: (tag) => (tag === undefined ? undefined : supplies.get(tag)),
     worked: (address) => known.get(address),
+    testsAt: (address) => tests.get(address) ?? [],
     provedDead: new Set(input.deadTests.filter(({ at }) => !('point' in at)).map(({ terminal }) => terminal)),
     stays,
     seeds: (family) => byFamily.get(family) ?? [],

@@ -1,5 +1,13 @@
-/** The resistance that a cable's two conductors should show, end to end and back. */
+/** The resistance that a cable's two conductors should show, out and back, with the far end shorted. */
 import type { Cable } from '../panel/device';
+import { inThousandths } from './inThousandths';
+import { ohmPerKm } from './ohmPerKm';
+
+// Conductor resistances are tabulated at 20 °C (IEC 60228).
+const coldC = 20;
+// Wide enough for a warm cable and clips, narrow enough to find a loose strand (checklist.md, Check cold).
+const share = 0.2;
+const leastOhm = 0.5;
 
 export interface ExpectedOhms {
   ohm: number;
@@ -7,4 +15,17 @@ export interface ExpectedOhms {
   low: number;
   high: number;
 }
-export const loopOhms = (_cable: Cable): ExpectedOhms | undefined => undefined;
+
+/** Expected `2·R′·l` ± the larger of 20 % and 0.5 ohm; undefined where the size has no known resistance. */
+export function loopOhms(cable: Cable): ExpectedOhms | undefined {
+  const perKm = ohmPerKm(cable, coldC);
+  if (perKm === undefined) return undefined;
+  const ohm = (2 * perKm * cable.lengthM) / 1000;
+  const spread = Math.max(ohm * share, leastOhm);
+  return {
+    ohm: inThousandths(ohm),
+    ohmPerKm: perKm,
+    low: inThousandths(Math.max(0, ohm - spread)),
+    high: inThousandths(ohm + spread),
+  };
+}

@@ -364,13 +364,22 @@ describe('proving points', () => {
     expect(places).toEqual([...places].sort((a, b) => a - b));
   });
 
-  test('computes what a switched-on input shows at worst', () => {
-    // 24 V × 0.85 − 2.5 V sensor = 17.9 V before the cable's own drop; 24 V × 1.2 = 28.8 V.
-    const on = ask('prove.DI3.01.on-volts');
-    if (on?.kind !== 'reading' || on.low === undefined) throw new Error('no window');
-    expect(on.low).toBeLessThanOrEqual(17.9);
-    expect(on.low).toBeGreaterThan(17.5);
-    expect(on.high).toBe(28.8);
+  test('computes what a switched-on output shows at worst', () => {
+    // 230 V − 10 % and + 10 %; closed relay contacts keep nothing and no cable is stated.
+    expect(ask('prove.DO5.01.on-volts')).toMatchObject({ unit: 'V AC', low: 207, high: 253 });
+  });
+
+  test('gives no low limit where a part of the sum is not known', () => {
+    const panel = smallPanel();
+    const modules = panel.modules.map((module) =>
+      module.io.kind === 'digital-output'
+        ? { ...module, io: { ...module.io, technology: 'triac' as const, onDropV: undefined } }
+        : module,
+    );
+    const list = generateChecklist(exampleInput({ ...panel, modules }));
+    const on = list.steps.find(({ id }) => id === 'prove.DO5.01.on-volts')?.ask;
+    expect(on).toMatchObject({ high: 253 });
+    expect(on).not.toHaveProperty('low');
   });
 
   test('wants an output off below its drop-out, either way round', () => {

@@ -6,13 +6,13 @@ import type { Checklist, Warning } from '../../shared/checklist/types';
 import type { Text } from '../../shared/panel/says';
 import { checklist as english } from '../../shared/wording/en/checklist';
 import { render } from '../../shared/wording/render';
-import { inputsOfDemoPanels } from '../support/demoInputs';
+import { inputsOfPanels } from '../support/demoInputs';
 import { countsOf, fleschKincaidGrade, syllablesIn } from '../support/readability';
 import { exampleInput } from '../support/smallPanel';
 
 const checklists: [string, Checklist][] = [
-  ['small panel', generateChecklist(exampleInput())],
-  ...inputsOfDemoPanels().map(([name, input]): [string, Checklist] => [name, generateChecklist(input)]),
+  ['small panel, plan by hand', generateChecklist(exampleInput())],
+  ...inputsOfPanels().map(([name, input]): [string, Checklist] => [name, generateChecklist(input)]),
 ];
 const languages: Language[] = ['en', 'es'];
 

@@ -176,7 +176,7 @@ export const smallPanel = (): Panel =>
           { role: 'plus', wire: '102', terminal: 'X1:1', colour: 'BN' },
           { role: 'minus', wire: '103', terminal: 'X1:5', colour: 'BU' },
         ],
-        cable: { tag: 'C1', size: { mm2: 0.34 }, lengthM: 20 },
+        cable: { tag: 'C1', size: { mm2: 0.5 }, lengthM: 20 },
       }),
       point('DI3.02', '2', 'G3', {
         cable: { tag: 'C2', size: { mm2: 1.5 }, lengthM: 100, conductor: 'class5' },

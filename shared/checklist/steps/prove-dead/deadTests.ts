@@ -16,6 +16,9 @@ const pairOrder: readonly Pair[] = [
   ...(['+/0 V', '+/PE', '0 V/PE', 'L/N', 'L1/L2', 'L2/L3', 'L1/L3'] as const),
   ...(['L1/N', 'L2/N', 'L3/N', 'L/PE', 'L1/PE', 'L2/PE', 'L3/PE', 'N/PE'] as const),
 ];
+/** A pair whose pole the file does not name comes after those with a name. */
+const orderOf = (pair: Pair): number =>
+  pairOrder.includes(pair) ? pairOrder.indexOf(pair) : pairOrder.length;
 const rank = { supply: 0, group: 1, point: 2 };
 
 function placeOf({ at }: DeadTest): { kind: keyof typeof rank; tag: string } {
@@ -35,7 +38,7 @@ function inOrder(facts: Facts): DeadTest[] {
         naturalCompare(a.supply, b.supply) ||
         rank[x.kind] - rank[y.kind] ||
         naturalCompare(x.tag, y.tag) ||
-        pairOrder.indexOf(a.pair) - pairOrder.indexOf(b.pair) ||
+        orderOf(a.pair) - orderOf(b.pair) ||
         naturalCompare(a.terminal + a.second, b.terminal + b.second)
       );
     });

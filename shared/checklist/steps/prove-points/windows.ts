@@ -19,22 +19,33 @@ const dropOf = (device: Device): number => ('dropV' in device ? device.dropV : 0
 const totalDrop = ({ point }: PointFacts): number =>
   [point.device, ...(point.series ?? [])].reduce((sum, device) => sum + dropOf(device), 0);
 
-/** Lowest: supply at its low limit, less what device and cable keep. Highest: supply at its high limit. */
-export function inputOn(worked: PointFacts, cableDropV: number): Window {
-  const limits = worked.supply && supplyLimits(worked.supply);
-  if (!limits || !worked.supply) return {};
-  const drop = totalDrop(worked);
+/**
+ * Lowest: supply at its low limit, less what device or output and cable keep; highest: supply at its high limit.
+ * A cable of unknown resistance or an unstated drop leaves no low limit: a sum with a hole in it is none.
+ */
+function switchedOn(
+  supply: Supply | undefined,
+  drop: number | undefined,
+  cable: number | undefined,
+  why: string,
+): Window {
+  const limits = supply && supplyLimits(supply);
+  if (!limits) return {};
+  if (drop === undefined || cable === undefined) return { high: limits.high, why: limits.why };
   return {
-    low: inThousandths(Math.max(0, limits.low - drop - cableDropV)),
+    low: inThousandths(Math.max(0, limits.low - drop - cable)),
     high: limits.high,
-    why: say('checklist.why.input-on', {
-      V: worked.supply.V,
-      factor: 1 + (worked.supply.tolerance?.minPct ?? 0) / 100,
+    why: say(why, {
+      V: supply.V,
+      factor: 1 + (supply.tolerance?.minPct ?? 0) / 100,
       drop,
-      cable: cableDropV,
+      cable: inThousandths(cable),
     }),
   };
 }
+
+export const inputOn = (worked: PointFacts, cable: number | undefined): Window =>
+  switchedOn(worked.supply, totalDrop(worked), cable, 'checklist.why.input-on');
 
 /** At most the module's own off voltage, either way round; without it no limit. */
 export function inputOff(io: DigitalInput, offV: number | undefined): Window {
@@ -45,21 +56,12 @@ export function inputOff(io: DigitalInput, offV: number | undefined): Window {
 // Default drop-out of a coil: 10 % DC, 15 % AC of its rated volts (wiring.md, from memory).
 const dropOutPct = (supply: Supply) => (supply.kind === 'dc' ? 10 : 15);
 
-/** At the load: the supply's low limit less the output's own drop and the cable's. */
-export function outputOn({ supply, module }: PointFacts, cableDropV: number): Window {
-  const limits = supply && supplyLimits(supply);
-  if (!limits || !supply) return {};
-  const drop = module.io.kind === 'digital-output' ? (module.io.onDropV ?? 0) : 0;
-  return {
-    low: inThousandths(Math.max(0, limits.low - drop - cableDropV)),
-    high: limits.high,
-    why: say('checklist.why.output-on', {
-      V: supply.V,
-      factor: 1 + (supply.tolerance?.minPct ?? 0) / 100,
-      drop,
-      cable: cableDropV,
-    }),
-  };
+/** At the load. */
+export function outputOn({ supply, module }: PointFacts, cable: number | undefined): Window {
+  const { io } = module;
+  // Closed relay contacts keep next to nothing; a transistor or triac that states no drop keeps nobody knows what.
+  const drop = io.kind !== 'digital-output' || io.technology === 'relay' ? 0 : io.onDropV;
+  return switchedOn(supply, drop, cable, 'checklist.why.output-on');
 }
 
 /** Off, a load must see less than holds it in, either way round. */

@@ -4,6 +4,7 @@ import { say } from '../../../panel/says';
 import { deadReading } from '../../asks';
 import type { Facts, PointFacts } from '../../facts';
 import { makeStep } from '../../makeStep';
+import { naturalCompare } from '../../naturalCompare';
 import type { Step } from '../../types';
 import { conductorsOf, type Conductor } from './conductorsOf';
 import { otherPoles, polesOf } from './poles';
@@ -18,21 +19,45 @@ interface Against {
   proves: boolean;
 }
 
-/** Earth first, then the other pole of the group, then every pole of a supply that reaches the terminal from elsewhere. */
-function readAgainst(facts: Facts, { point, group, supply }: PointFacts, terminal: string): Against[] {
+/** What the isolation engine asks of this terminal; the group's other pole where it asks nothing of that supply. */
+function polesAgainst(facts: Facts, { point, group, supply }: PointFacts, terminal: string): Against[] {
+  const earth = facts.panel.earthTerminal;
+  const tested = facts
+    .testsAt(point.address)
+    .filter((test) => test.terminal === terminal && test.second !== earth)
+    .sort((a, b) => naturalCompare(a.second, b.second));
+  const own = supply
+    ? otherPoles(group, supply).map((second) => ({ second, supply: supply.tag, proves: true }))
+    : [];
+  const foreign = foreignSupplies(point)
+    .map((tag) => facts.supply(tag ?? undefined))
+    .filter((each) => each !== undefined)
+    .flatMap((each) => polesOf(each).map((second) => ({ second, supply: each.tag, proves: true })));
+  const ownPoles = new Set(supply ? polesOf(supply) : []);
+  const ownTested = tested.some(({ second }) => ownPoles.has(second));
+  const against = [...tested, ...(ownTested ? [] : own), ...foreign];
+  const unique = new Map(
+    against
+      .filter(({ second }) => second !== terminal && second !== earth)
+      .reverse()
+      .map((each) => [each.second, each]),
+  );
+  return [...unique.values()].reverse().map(({ second, supply: tag, proves }) => ({
+    name: `pole.${second}`,
+    second,
+    supply: tag,
+    proves,
+  }));
+}
+
+/** Earth first, then every pole. A supply nobody can name may be unearthed: then the pair to earth proves nothing. */
+function readAgainst(facts: Facts, worked: PointFacts, terminal: string): Against[] {
+  const { point, group, supply } = worked;
   const reaching = foreignSupplies(point).map((tag) => facts.supply(tag ?? undefined));
-  const foreign = reaching.filter((each) => each !== undefined);
-  // A supply nobody can name may be unearthed: then the pair to earth proves nothing.
-  const earthed = [supply, ...reaching].every((each) => each?.earthed ?? false);
-  const poles = [
-    ...(supply ? otherPoles(group, supply) : []).map((second) => ({ second, supply: supply?.tag ?? '' })),
-    ...foreign.flatMap((each) => polesOf(each).map((second) => ({ second, supply: each.tag }))),
-  ].filter(({ second }) => second !== terminal && second !== facts.panel.earthTerminal);
-  const unique = [...new Map(poles.map((pole) => [pole.second, pole])).values()];
-  return [
-    { name: 'pe', second: facts.panel.earthTerminal, supply: supply?.tag ?? group.tag, proves: earthed },
-    ...unique.map((pole, i) => ({ name: i === 0 ? 'pole' : `pole.${pole.second}`, ...pole, proves: true })),
-  ];
+  const proves = [supply, ...reaching].every((each) => each?.earthed ?? false);
+  const second = facts.panel.earthTerminal;
+  const toEarth = { name: 'pe', second, supply: supply?.tag ?? group.tag, proves };
+  return [...(second === terminal ? [] : [toEarth]), ...polesAgainst(facts, worked, terminal)];
 }
 
 function readings(facts: Facts, worked: PointFacts, { name, terminal }: Conductor): Step[] {
