@@ -2,7 +2,7 @@
 export function StageBar({ done, of, words }: { done: number; of: number; words: string }) {
   return (
     <div>
-      <div aria-hidden="true" className="flex h-3.5 w-44 border border-ink">
+      <div aria-hidden="true" className="flex h-3.5 w-44 max-w-full border border-ink">
         {Array.from({ length: of }, (_, index) => (
           <span
             key={index}

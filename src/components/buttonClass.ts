@@ -1,5 +1,5 @@
 const base =
-  'inline-flex min-h-11 cursor-pointer items-center justify-center gap-2 rounded-[3px] border-2 px-4 py-1 font-bold no-underline transition-colors duration-100 disabled:cursor-not-allowed aria-disabled:cursor-not-allowed';
+  'inline-flex min-h-11 cursor-pointer items-center justify-center gap-2 rounded-[3px] border-2 px-4 py-1 md:whitespace-nowrap font-bold no-underline transition-colors duration-100 disabled:cursor-not-allowed aria-disabled:cursor-not-allowed';
 
 const looks = {
   primary:

@@ -12,7 +12,7 @@ export function TitleBlock({ cells }: { cells: readonly TitleCell[] }) {
       {cells.map((cell) => (
         <div
           key={cell.label}
-          className="min-w-28 grow border-ink px-3.5 py-1.5 md:border-l max-md:not-first:border-l"
+          className="min-w-20 grow md:min-w-28 border-ink px-3 py-1.5 md:border-l max-md:not-first:border-l"
         >
           <dt className="text-xs text-muted">{cell.label}</dt>
           <dd className="m-0 font-mono font-semibold wrap-anywhere">{cell.value}</dd>

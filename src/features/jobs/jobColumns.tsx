@@ -12,12 +12,12 @@ type T = (key: WordingKey) => string;
 
 const lead = (t: T): Column<JobRow>[] => [
   { head: t('office.job'), className: 'md:w-[9%]', cell: (job) => <JobNumber job={job} /> },
-  { head: t('office.panel'), className: 'md:w-[23%]', cell: (job) => <PanelName job={job} /> },
+  { head: t('office.panel'), className: 'md:w-[19%] lg:w-[23%]', cell: (job) => <PanelName job={job} /> },
 ];
 const last = (t: T, cell: Column<JobRow>['cell']): Column<JobRow> => ({
   head: t('office.act'),
   headHidden: true,
-  className: 'md:w-[13%]',
+  className: 'md:w-[17%] lg:w-[13%]',
   cell,
 });
 const oldest = (job: JobRow): string => job.waiting.map((each) => each.since).sort()[0] ?? '';
@@ -40,7 +40,7 @@ export const waitingColumns = (t: T): Column<JobRow>[] => [
 
 export const runningColumns = (t: T, now: number): Column<JobRow>[] => [
   ...lead(t),
-  { head: t('office.stage'), className: 'md:w-[18%]', cell: (job) => <Progress job={job} /> },
+  { head: t('office.stage'), className: 'md:w-[22%] lg:w-[18%]', cell: (job) => <Progress job={job} /> },
   { head: t('office.locksOn'), cell: (job) => <LocksOn job={job} /> },
   { head: t('office.lastHeard'), className: 'md:w-[15%]', cell: (job) => <LastHeard job={job} now={now} /> },
   last(t, (job) => <ButtonLink to={paths.job(job.id)}>{t('office.open')}</ButtonLink>),
