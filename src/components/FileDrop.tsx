@@ -1,4 +1,6 @@
 import { useId, useState, type DragEvent } from 'react';
+import { buttonClass } from './buttonClass';
+import { useWords } from './words';
 
 interface FileDropProps {
   label: string;
@@ -8,8 +10,9 @@ interface FileDropProps {
   onFile: (file: File) => void;
 }
 
-/** One file, dropped or chosen. The file input itself stays the control: keyboard and screen reader need nothing else. */
+/** One file, dropped or chosen. The browser's file input stays the control for keyboard and screen reader; its own words, which follow the browser's language, are not shown. */
 export function FileDrop({ label, hint, accept, busy = false, onFile }: FileDropProps) {
+  const { t } = useWords();
   const id = useId();
   const [over, setOver] = useState(false);
   const take = (files: FileList | null) => {
@@ -29,11 +32,11 @@ export function FileDrop({ label, hint, accept, busy = false, onFile }: FileDrop
       }}
       onDragLeave={() => setOver(false)}
       onDrop={drop}
-      className={`my-3 max-w-[44rem] border-2 border-dashed px-5 py-4 ${over ? 'border-ink bg-paper' : 'border-edge'}`}
+      className={`relative my-3 max-w-[44rem] border-2 border-dashed px-5 py-4 ${over ? 'border-ink bg-paper' : 'border-edge'}`}
     >
-      <label htmlFor={id} className="block font-bold">
+      <p id={`${id}-label`} className="m-0 font-bold">
         {label}
-      </label>
+      </p>
       <p id={`${id}-hint`} className="m-0 mb-2 text-sm text-muted">
         {hint}
       </p>
@@ -42,14 +45,24 @@ export function FileDrop({ label, hint, accept, busy = false, onFile }: FileDrop
         type="file"
         accept={accept}
         disabled={busy}
+        aria-labelledby={`${id}-label`}
         aria-describedby={`${id}-hint`}
-        className="max-w-full min-h-11 cursor-pointer file:mr-3 file:min-h-11 file:cursor-pointer file:rounded-[3px] file:border-2 file:border-solid file:border-ink file:bg-sheet file:px-4 file:font-bold file:text-ink"
+        className="peer sr-only"
         onChange={(event) => {
           take(event.target.files);
           // The same file, mended and chosen again, must count as a change.
           event.target.value = '';
         }}
       />
+      <label
+        htmlFor={id}
+        className={buttonClass(
+          'outlined',
+          'peer-focus-visible:outline-3 peer-focus-visible:outline-offset-2 peer-focus-visible:outline-ink peer-disabled:cursor-not-allowed peer-disabled:border-edge peer-disabled:text-muted',
+        )}
+      >
+        {t('app.chooseFile')}
+      </label>
     </div>
   );
 }

@@ -14,6 +14,7 @@ export const app = {
   'app.saved': 'Saved.',
   'app.back': 'Back',
   'app.next': 'Next',
+  'app.chooseFile': 'Choose a file',
   'app.more': 'Show more',
   'app.loading': 'Fetching…',
   'app.skip': 'Go to the page',

@@ -16,6 +16,7 @@ export const app = {
   'app.saved': 'Guardado.',
   'app.back': 'Atrás',
   'app.next': 'Siguiente',
+  'app.chooseFile': 'Elegir un archivo',
   'app.more': 'Mostrar más',
   'app.loading': 'Cargando…',
   'app.skip': 'Ir a la página',

@@ -19,7 +19,7 @@ export function RecordsTable({ rows }: { rows: readonly RecordRow[] }) {
     },
     {
       head: t('office.panel'),
-      className: 'md:w-[24%]',
+      className: 'md:w-[18%] lg:w-[24%]',
       cell: (row) => (
         <>
           <strong className="font-mono">{row.panelTag}</strong> {row.panelName}
@@ -36,7 +36,7 @@ export function RecordsTable({ rows }: { rows: readonly RecordRow[] }) {
     { head: t('records.countersignedBy'), cell: (row) => row.foreman },
     {
       head: t('records.exceptions'),
-      className: 'md:w-[12%]',
+      className: 'md:w-[18%] lg:w-[12%]',
       cell: (row) => (
         <>
           {row.exceptions === 0
