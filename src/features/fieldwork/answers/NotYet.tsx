@@ -1,18 +1,18 @@
 import type { Step } from '../../../../shared/checklist/types';
-import { nextStep } from '../../../../shared/job/next';
 import type { Refusal } from '../../../../shared/job/types';
 import { paths } from '../../../app/paths';
 import { FieldLink } from '../../../components/field/FieldButton';
 import { MarkedText } from '../../../components/field/MarkedText';
 import { useWords } from '../../../components/words';
+import { nextFor } from '../job/engine';
 import { useFieldJob } from '../job/useFieldJob';
 import { StepFrame } from '../step/StepFrame';
 
 /** This step's gate is shut for this person: why, in words, and the way to what opens it. */
 export function NotYet({ step, refusals }: { step: Step; refusals: Refusal[] }) {
   const { t } = useWords();
-  const { pack, state, me, marked } = useFieldJob();
-  const next = nextStep(pack.checklist, state, me.person);
+  const { pack, local, me, marked } = useFieldJob();
+  const next = nextFor(local, me.person);
   return (
     <StepFrame
       step={step}

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import type { Step } from '../../../../shared/checklist/types';
-import { gateFor } from '../../../../shared/job/gates';
+import { stepGate } from '../job/engine';
 import { useFieldJob } from '../job/useFieldJob';
 import { ownAnswer } from '../step/ownAnswer';
 import { ChoiceAnswer } from './ChoiceAnswer';
@@ -39,9 +39,9 @@ function AnswerOf({ step }: { step: Step }) {
 
 /** The answer a step asks for; the reasons while its gate is shut; what to do while its answer is out of limits. */
 export function StepAnswer({ step }: { step: Step }) {
-  const { pack, state, me } = useFieldJob();
+  const { local, state, me } = useFieldJob();
   const [again, setAgain] = useState<string>();
-  const gate = gateFor(pack.checklist, state, me.person, step.id);
+  const gate = stepGate(local, me.person, step.id);
   const { status, answer } = ownAnswer(state, step, me.person);
   if (!gate.open) return <NotYet step={step} refusals={gate.refusals} />;
   if (status === 'out' && answer && again !== answer.entry)

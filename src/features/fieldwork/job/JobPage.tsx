@@ -1,7 +1,5 @@
 import { useEffect } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { canSign } from '../../../../shared/job/canSign';
-import { nextStep } from '../../../../shared/job/next';
 import { paths } from '../../../app/paths';
 import { ActionBar } from '../../../components/field/ActionBar';
 import { FieldButton, FieldLink } from '../../../components/field/FieldButton';
@@ -12,6 +10,7 @@ import { UnsentLine } from '../layout/UnsentLine';
 import { MoreButton } from '../more/MoreButton';
 import { StopButton } from '../more/StopButton';
 import { AcceptJob } from './AcceptJob';
+import { nextFor, signGate } from './engine';
 import { JobFacts } from './JobFacts';
 import { JobHeader } from './JobHeader';
 import { StageList } from './StageList';
@@ -20,7 +19,7 @@ import { useFieldJob } from './useFieldJob';
 /** The one big button: carry on with this person's next step, sign, or read what was signed. */
 function CarryOn() {
   const { t } = useWords();
-  const { pack, state, me, part, plain } = useFieldJob();
+  const { pack, local, me, part, plain } = useFieldJob();
   const job = pack.job.id;
   if (part === 'foreman')
     return (
@@ -28,7 +27,7 @@ function CarryOn() {
         {t('field.jobs.review')}
       </FieldLink>
     );
-  const next = nextStep(pack.checklist, state, me.person);
+  const next = nextFor(local, me.person);
   if (next)
     return (
       <FieldLink
@@ -40,7 +39,7 @@ function CarryOn() {
         <span className="max-w-full truncate text-[0.85rem] font-normal">{plain(next.title)}</span>
       </FieldLink>
     );
-  const isSignable = canSign(pack.checklist, state, me.person).open;
+  const isSignable = signGate(local, me.person).open;
   return (
     <FieldLink
       look={isSignable ? 'primary' : 'outlined'}

@@ -1,12 +1,12 @@
 import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { canCountersign } from '../../../../shared/job/canCountersign';
 import { paths } from '../../../app/paths';
 import { ActionBar } from '../../../components/field/ActionBar';
 import { FieldButton } from '../../../components/field/FieldButton';
 import { FieldPage } from '../../../components/field/FieldPage';
 import { useWords } from '../../../components/words';
 import { SaveButton } from '../answers/SaveButton';
+import { countersignGate } from '../job/engine';
 import { JobHeader } from '../job/JobHeader';
 import { NotSaved } from '../job/NotSaved';
 import { useFieldJob } from '../job/useFieldJob';
@@ -33,7 +33,7 @@ export function ReviewPage() {
   const [picture, setPicture] = useState<Picture>();
   const [ticked, setTicked] = useState<string[]>([]);
   const [returning, setReturning] = useState(false);
-  const gate = canCountersign(job.pack.checklist, job.state, job.me.person);
+  const gate = countersignGate(job.local, job.me.person);
   async function countersign() {
     if (!picture) return;
     const body = signatureBody(job, language, t('field.sign.countersignMeaning'), picture);

@@ -6,9 +6,9 @@ import { FieldButton } from '../../../components/field/FieldButton';
 import { FieldPage } from '../../../components/field/FieldPage';
 import { MarkedText } from '../../../components/field/MarkedText';
 import { useWords } from '../../../components/words';
-import { canSign } from '../../../../shared/job/canSign';
 import type { Refusal } from '../../../../shared/job/types';
 import { SaveButton } from '../answers/SaveButton';
+import { signGate } from '../job/engine';
 import { JobHeader } from '../job/JobHeader';
 import { NotSaved } from '../job/NotSaved';
 import { useFieldJob } from '../job/useFieldJob';
@@ -45,7 +45,7 @@ export function SignPage() {
   const navigate = useNavigate();
   const { save, saving, failed } = useSave();
   const [picture, setPicture] = useState<Picture>();
-  const gate = canSign(job.pack.checklist, job.state, job.me.person);
+  const gate = signGate(job.local, job.me.person);
   async function sign() {
     if (!picture) return;
     const body = signatureBody(job, language, t('field.sign.meaning'), picture);

@@ -1,5 +1,4 @@
 import { useNavigate } from 'react-router-dom';
-import { nextStep } from '../../../../shared/job/next';
 import type { LockState } from '../../../../shared/job/types';
 import { paths } from '../../../app/paths';
 import { FieldButton } from '../../../components/field/FieldButton';
@@ -9,7 +8,7 @@ import { Sheet } from '../../../components/field/Sheet';
 import { SignalBox } from '../../../components/SignalBox';
 import { useWords } from '../../../components/words';
 import { useDeviceStore } from '../../../offline/useDevice';
-import { folded } from '../job/folded';
+import { nextFor } from '../job/engine';
 import { NotSaved } from '../job/NotSaved';
 import { useFieldJob } from '../job/useFieldJob';
 import { useSave } from '../job/useSave';
@@ -48,7 +47,7 @@ export function BreakSheet({ awayMs, locks }: { awayMs: number; locks: LockState
   async function again(words: string) {
     if (!(await save('round-started', { points: pack.checklist.scope, reason: 'break', words }))) return;
     const fresh = await store.job(pack.job.id);
-    const next = fresh && nextStep(pack.checklist, folded(fresh), me.person);
+    const next = fresh && nextFor(fresh, me.person);
     await navigate(next ? paths.step(pack.job.id, next.id) : paths.myJob(pack.job.id));
   }
   const confirm = () =>

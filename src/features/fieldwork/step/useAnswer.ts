@@ -2,11 +2,11 @@ import { useRef } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { Step } from '../../../../shared/checklist/types';
 import type { AnswerValue, BodyOf, EntryKind } from '../../../../shared/job/entry';
-import { nextStep } from '../../../../shared/job/next';
 import { paths } from '../../../app/paths';
 import { oneLine } from '../../../components/field/oneLine';
 import { useWords } from '../../../components/words';
 import { useDeviceStore } from '../../../offline/useDevice';
+import { nextFor } from '../job/engine';
 import { folded } from '../job/folded';
 import { useFieldJob } from '../job/useFieldJob';
 import { useSave, type Save } from '../job/useSave';
@@ -37,7 +37,7 @@ export function useAnswer(step: Step): Answering {
     if (!fresh) return;
     const state = folded(fresh);
     if (ownAnswer(state, step, me.person).status === 'out') return;
-    const next = nextStep(pack.checklist, state, me.person);
+    const next = nextFor(fresh, me.person);
     const to = next ? paths.step(pack.job.id, next.id) : paths.myJob(pack.job.id);
     await navigate(to, { state: { saved: step.id } });
   }
