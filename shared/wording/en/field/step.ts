@@ -111,6 +111,14 @@ export const step = {
   'field.photo.unreadable': 'This file is no picture that can be used. Take another one.',
   'field.photo.onlyPrint':
     'This version keeps the photo’s fingerprint, not the photo. Keep the photo on your phone as well.',
+  'field.clear.title': 'Is everybody clear?',
+  'field.clear.what': 'Before an isolator is closed, each person says so with their own PIN.',
+  'field.clear.is': 'is clear.',
+  'field.clear.say': '{name} is clear',
+  'field.clear.means': 'My hands, my tools and my people are out. I expect power to come back.',
+  'field.clear.pin': 'PIN of {name}',
+  'field.clear.cannot':
+    '{name} must say it with their own PIN: here, after setting one in This device, or on their own phone.',
   'field.break.title': '{minutes, plural, =0 {You were away} other {You were away for # min}}',
   'field.break.last': 'Your last answer',
   'field.break.look': 'Go and look at your locks now.',

@@ -111,6 +111,14 @@ export const step = {
   'field.photo.unreadable': 'Este archivo no es una imagen que sirva. Haga otra.',
   'field.photo.onlyPrint':
     'Esta versión guarda la huella de la foto, no la foto. Conserve también la foto en su teléfono.',
+  'field.clear.title': '¿Están todos fuera?',
+  'field.clear.what': 'Antes de conectar, cada persona lo dice con su propio PIN.',
+  'field.clear.is': 'está fuera.',
+  'field.clear.say': '{name} está fuera',
+  'field.clear.means': 'Mis manos, mis herramientas y mi gente están fuera. Espero que vuelva la tensión.',
+  'field.clear.pin': 'PIN de {name}',
+  'field.clear.cannot':
+    '{name} debe decirlo con su propio PIN: aquí, tras fijarlo en Este dispositivo, o en su teléfono.',
   'field.break.title': '{minutes, plural, =0 {Ha estado fuera} other {Ha estado fuera # min}}',
   'field.break.last': 'Su última respuesta',
   'field.break.look': 'Vaya ahora a ver sus candados.',

@@ -6,6 +6,7 @@ import { MarkedText } from '../../../components/field/MarkedText';
 import { useWords } from '../../../components/words';
 import { nextFor } from '../job/engine';
 import { useFieldJob } from '../job/useFieldJob';
+import { ClearList } from '../locks/ClearList';
 import { StepFrame } from '../step/StepFrame';
 
 /** This step's gate is shut for this person: why, in words, and the way to what opens it. */
@@ -17,16 +18,19 @@ export function NotYet({ step, refusals }: { step: Step; refusals: Refusal[] }) 
     <StepFrame
       step={step}
       answer={
-        <div className="border-2 border-ink bg-sheet px-3 py-2">
-          <p className="m-0 font-bold">{t('field.gate.notYet')}</p>
-          <ul className="m-0 grid gap-1 pl-5">
-            {refusals.map((refusal, index) => (
-              <li key={index}>
-                <MarkedText text={marked(refusal.says)} look="bold" />
-              </li>
-            ))}
-          </ul>
-        </div>
+        <>
+          <div className="border-2 border-ink bg-sheet px-3 py-2">
+            <p className="m-0 font-bold">{t('field.gate.notYet')}</p>
+            <ul className="m-0 grid gap-1 pl-5">
+              {refusals.map((refusal, index) => (
+                <li key={index}>
+                  <MarkedText text={marked(refusal.says)} look="bold" />
+                </li>
+              ))}
+            </ul>
+          </div>
+          {step.stage === 'close' && <ClearList />}
+        </>
       }
       primary={
         <FieldLink

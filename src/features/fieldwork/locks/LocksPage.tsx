@@ -12,6 +12,7 @@ import { useFieldJob } from '../job/useFieldJob';
 import { UnsentLine } from '../layout/UnsentLine';
 import { MoreButton } from '../more/MoreButton';
 import { StopButton } from '../more/StopButton';
+import { ClearList } from './ClearList';
 import { OwnProof } from './OwnProof';
 
 function LockLine({ lock }: { lock: LockState }) {
@@ -74,6 +75,7 @@ export function LocksPage() {
           );
         })}
       </ol>
+      <ClearList />
     </FieldPage>
   );
 }
