@@ -1,0 +1,19 @@
+/** The name of this device: made once, kept with the keys, lost with them. */
+import { v7 } from 'uuid';
+import type { DeviceEnvironment } from './environment';
+import type { Outbox } from './outboxDatabase';
+
+const key = 'device';
+
+/** One transaction, so two tabs that start together agree. */
+export async function deviceId(env: DeviceEnvironment, outbox: Outbox): Promise<string> {
+  const made = v7({ msecs: env.now(), random: env.randomBytes(16) });
+  return outbox.run(async (database) => {
+    const transaction = database.transaction('settings', 'readwrite', { durability: 'strict' });
+    const kept = await transaction.store.get(key);
+    if (typeof kept === 'string') return kept;
+    await transaction.store.put(made, key);
+    await transaction.done;
+    return made;
+  });
+}

@@ -1,0 +1,125 @@
+/** Decides when a sending round runs: on a wake, a new entry, a request, or its own timer. */
+import { backoffMs, minWaitMs } from './backoff';
+import type { DeviceEnvironment } from './environment';
+import type { RoundOutcome } from './roundOutcome';
+import type { RoundScope } from './sendingRound';
+import type { SendState } from './types';
+
+// sync.md: open screens are refreshed every 5 s; failures.md row 22: all else every minute while visible.
+const watchedMs = 5_000;
+const visibleMs = 60_000;
+// Beyond an hour a Retry-After is taken for a fault of whoever wrote it.
+const maxRetryAfterMs = 3_600_000;
+// While in the background the timer alone may wait as long as the back-off may: 2^9 s is above its top.
+const idleFailures = 9;
+const lockName = 'coldloop-sending';
+
+export interface SenderHooks {
+  /** Nothing is sent or pulled before somebody is enrolled here. */
+  wanted(): Promise<boolean>;
+  round(scope: RoundScope): Promise<RoundOutcome>;
+  watched(): string[];
+  /** The state in memory has changed. */
+  told(): Promise<void>;
+}
+
+/** The store itself failed: nothing was removed, so the same round can be tried again. */
+const storeFault = (error: unknown): RoundOutcome => ({
+  end: 'wait',
+  says: {
+    key: 'device.store.error.store',
+    params: { says: error instanceof Error ? error.message : String(error) },
+  },
+  retryAfterMs: null,
+});
+
+export class Sender {
+  state: SendState['state'] = 'idle';
+  lastError: SendState['lastError'] = null;
+  private failures = 0;
+  private notBefore = 0;
+  private lastFullAt = -Infinity;
+  private running: Promise<void> | null = null;
+  private again = false;
+  private cancelTimer: (() => void) | null = null;
+  private stopWaking: (() => void) | null = null;
+
+  constructor(
+    private readonly env: DeviceEnvironment,
+    private readonly hooks: SenderHooks,
+  ) {}
+
+  start(): () => void {
+    this.stopWaking ??= this.env.onWake(() => void this.trigger());
+    void this.trigger();
+    return () => {
+      this.stopWaking?.();
+      this.stopWaking = null;
+      this.cancelTimer?.();
+      this.cancelTimer = null;
+    };
+  }
+
+  /** Runs a whole round, or has the running one followed by another; resolves when that is over. */
+  async trigger(scope: RoundScope = {}): Promise<void> {
+    if (this.running) {
+      this.again = true;
+      return this.running;
+    }
+    this.running = this.runRounds(scope).finally(() => {
+      this.running = null;
+      this.schedule();
+    });
+    return this.running;
+  }
+
+  private async runRounds(scope: RoundScope): Promise<void> {
+    let next = scope;
+    do {
+      this.again = false;
+      await this.runOne(next);
+      next = {};
+    } while (this.again && this.state !== 'waiting');
+  }
+
+  private async runOne(scope: RoundScope): Promise<void> {
+    if (this.env.monotonic() < this.notBefore || !(await this.hooks.wanted())) return;
+    const ran = await this.env.whileLocked(lockName, async () => {
+      this.state = 'sending';
+      await this.hooks.told();
+      const outcome = await this.hooks.round(scope).catch(storeFault);
+      if (!scope.only) this.lastFullAt = this.env.monotonic();
+      this.settle(outcome);
+    });
+    // Another tab is sending: what it does not take is tried shortly after.
+    if (!ran) this.failures = Math.max(this.failures, 1);
+    await this.hooks.told();
+  }
+
+  private settle(outcome: RoundOutcome): void {
+    const ends = { done: 'idle', refused: 'waiting', wait: 'waiting', 'sign-in': 'needs-sign-in' } as const;
+    this.state = ends[outcome.end];
+    this.lastError = 'says' in outcome ? outcome.says : null;
+    this.failures = outcome.end === 'done' ? 0 : this.failures + 1;
+    const wait = outcome.end === 'wait' ? Math.min(outcome.retryAfterMs ?? 0, maxRetryAfterMs) : 0;
+    this.notBefore = this.env.monotonic() + wait;
+  }
+
+  private waitMs(): number {
+    const asked = this.notBefore - this.env.monotonic();
+    if (this.failures > 0) return Math.max(asked, backoffMs(this.failures, this.env.random()));
+    if (!this.env.isVisible()) return Math.max(visibleMs, backoffMs(idleFailures, this.env.random()));
+    return this.hooks.watched().length > 0 ? watchedMs : visibleMs;
+  }
+
+  /** The timer runs only between `start` and its end. */
+  private schedule(): void {
+    this.cancelTimer?.();
+    if (!this.stopWaking) return;
+    this.cancelTimer = this.env.setTimer(Math.max(minWaitMs, this.waitMs()), () => {
+      const full = this.env.monotonic() - this.lastFullAt >= visibleMs || this.failures > 0;
+      void this.trigger(full ? {} : { only: this.hooks.watched() });
+    });
+  }
+}
+
