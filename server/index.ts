@@ -1,26 +1,9 @@
-/** Listens, and stops without cutting anybody off. */
-import { createServer } from 'node:http';
-import { createApp } from './app';
+/** The server by itself, all settings from the environment: for production and for `npm run dev`. */
 import { readConfig } from './config';
-import { createServices } from './services';
+import { serve } from './serve';
+import { untilStopped } from './untilStopped';
 
-const config = readConfig();
-const services = await createServices(config);
-await services.start();
-const server = createServer(createApp(services));
-server.listen(config.port, config.host, () => {
-  services.log.info({ port: config.port }, 'serving');
-  process.send?.('ready');
-});
-
-let stopping = false;
-function stop(): void {
-  if (stopping) return;
-  stopping = true;
-  server.close(() => {
-    void services.close().then(() => process.exit(0));
-  });
-  server.closeIdleConnections();
-}
-process.on('SIGTERM', stop);
-process.on('SIGINT', stop);
+const serving = await serve(readConfig());
+await untilStopped();
+await serving.close();
+process.exit(0);
