@@ -9,7 +9,7 @@ export function staticClient(): RequestHandler {
   return express.static(clientFolder, {
     index: false,
     setHeaders: (response, path) => {
-      const hashed = path.includes(`${join('client', 'assets')}`);
+      const hashed = path.includes(join('client', 'assets'));
       response.setHeader('cache-control', hashed ? 'public, max-age=31536000, immutable' : 'no-cache');
     },
   });

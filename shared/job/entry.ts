@@ -10,7 +10,7 @@ const words = text(2000);
 
 export const answerValue = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('done') }),
-  z.strictObject({ kind: z.literal('reading'), value: z.number().finite() }),
+  z.strictObject({ kind: z.literal('reading'), value: z.number() }),
   z.strictObject({ kind: z.literal('choice'), value: text(80) }),
   z.strictObject({ kind: z.literal('text'), text: words }),
   z.strictObject({ kind: z.literal('photo'), sha256 }),

@@ -2,12 +2,17 @@
 import type { CouldNotRun, Finding, Where } from './finding';
 import { say } from '../panel/says';
 
-const owners = { supplies: 'supply', modules: 'module', groups: 'group', points: 'point' } as const;
+const owners: Partial<Record<string, 'supply' | 'module' | 'group' | 'point'>> = {
+  supplies: 'supply',
+  modules: 'module',
+  groups: 'group',
+  points: 'point',
+};
 
 /** The place that owns a field, told by the first word of its path and the place that asked. */
 function ownerOf({ where, missing }: CouldNotRun): Where {
   const [list = '', ...rest] = missing.split('.');
-  const kind = owners[list as keyof typeof owners];
+  const kind = owners[list];
   if (kind === undefined || where[kind] !== undefined) return where;
   const ending =
     /\.(tolerance|ratedA|otherLoadA|protectionA|io(\..*)?|commonInsulationV|terminals|terminalRange|supply|module|phase|fuse(\..*)?|common)$/;

@@ -1,4 +1,5 @@
 /** Every sentence a person reads, in Spanish, gathered from one file an area. */
+import type { en } from './en';
 import { findings } from './es/findings';
 import { isolation } from './es/isolation';
 import { checklist } from './es/checklist';
@@ -25,4 +26,4 @@ export const es = {
   ...records,
   ...mail,
   ...problems,
-} as const satisfies Record<keyof typeof import('./en').en, string>;
+} as const satisfies Record<keyof typeof en, string>;

@@ -5,7 +5,7 @@ import { oneLine } from '../../src/components/field/oneLine';
 import { text } from '../../shared/panel/units';
 
 const press = (keys: string): string =>
-  [...keys].reduce(
+  Array.from(keys).reduce(
     (value, key) => padPress(value, (key === 'w' ? 'wipe' : key === '<' ? 'back' : key) as PadKey),
     '',
   );

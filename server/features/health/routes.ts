@@ -1,17 +1,14 @@
 import { Router } from 'express';
-import type { DataSource } from 'typeorm';
 import { authorise } from '../../http/authorise';
 import { Refused } from '../../http/refused';
 
-export function healthRoutes(database: DataSource): Router {
+export function healthRoutes(isReady: () => Promise<boolean>): Router {
   const router = Router();
   router.get('/health/live', authorise({ who: 'anyone' }), (_request, response) => {
     response.json({ live: true });
   });
   router.get('/health/ready', authorise({ who: 'anyone' }), async (_request, response) => {
-    await database.query('SELECT 1').catch(() => {
-      throw new Refused(503, 'not-ready', {}, [], { 'retry-after': '5' });
-    });
+    if (!(await isReady())) throw new Refused(503, 'not-ready', {}, [], { 'retry-after': '5' });
     response.json({ ready: true });
   });
   return router;

@@ -58,7 +58,7 @@ export function sessionParts(config: Config, people: PeopleService): SessionPart
       own.session() as RequestHandler,
     ],
     close: async () => {
-      await store.close();
+      store.close();
       await pool.end();
     },
   };

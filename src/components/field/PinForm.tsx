@@ -1,4 +1,4 @@
-import { useEffect, useId, useState, type FormEvent } from 'react';
+import { useEffect, useId, useState, type SubmitEvent } from 'react';
 import { useWords } from '../words';
 import { FieldButton } from './FieldButton';
 import { NumberPad } from './NumberPad';
@@ -40,7 +40,7 @@ export function PinForm({ label, submit, check }: PinFormProps) {
   const [wrong, setWrong] = useState(false);
   const [busy, setBusy] = useState(false);
   const [left, setLeft] = useSecondsLeft();
-  async function tryPin(event: FormEvent) {
+  async function tryPin(event: SubmitEvent) {
     event.preventDefault();
     if (busy || left > 0 || pin.length < minPinLength) return;
     setBusy(true);

@@ -1,4 +1,4 @@
-import { useState, type FormEvent } from 'react';
+import { useState, type SubmitEvent } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { useSession } from '../../api/session';
 import { paths } from '../../app/paths';
@@ -22,7 +22,7 @@ function SetPin({ person }: { person: SessionView['person'] }) {
   const [failed, setFailed] = useState(false);
   const tooShort = pin.length > 0 && pin.length < minPinLength;
   const differs = again.length > 0 && again !== pin;
-  async function enrol(event: FormEvent) {
+  async function enrol(event: SubmitEvent) {
     event.preventDefault();
     setBusy(true);
     setFailed(false);

@@ -1,4 +1,4 @@
-import type { FormEvent } from 'react';
+import type { SubmitEvent } from 'react';
 import { Button } from '../../components/Button';
 import { CheckField } from '../../components/form/CheckField';
 import { TextField } from '../../components/form/TextField';
@@ -22,7 +22,7 @@ function searchOf(form: HTMLFormElement): URLSearchParams {
 
 export function RecordFilter({ search, onSearch }: RecordFilterProps) {
   const { t } = useWords();
-  const submit = (event: FormEvent<HTMLFormElement>) => {
+  const submit = (event: SubmitEvent<HTMLFormElement>) => {
     event.preventDefault();
     onSearch(searchOf(event.currentTarget));
   };

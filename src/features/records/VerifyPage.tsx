@@ -1,4 +1,4 @@
-import { useState, type FormEvent } from 'react';
+import { useState, type SubmitEvent } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { useVerify } from '../../api/records';
 import { Button } from '../../components/Button';
@@ -20,7 +20,7 @@ export function VerifyPage() {
   const [typed, setTyped] = useState(search.get('digest') ?? '');
   const [wrong, setWrong] = useState<'records.verify.notDigest' | 'records.verify.notRecord'>();
   const verify = useVerify();
-  const byDigest = (event: FormEvent) => {
+  const byDigest = (event: SubmitEvent) => {
     event.preventDefault();
     const digest = typed.replace(/\s/g, '').toLowerCase();
     const whole = fullDigest.test(digest);

@@ -10,7 +10,7 @@ import { useWords } from '../../components/words';
 // The length is the contract's (`newPassword` of shared/api/people); its words are ours.
 const newPasswordForm = z
   .object({ password: z.string().min(15, 'app.password.short').max(200), again: z.string() })
-  .refine((values) => values.password === values.again, { path: ['again'], message: 'app.password.differs' });
+  .refine((values) => values.password === values.again, { path: ['again'], error: 'app.password.differs' });
 
 interface NewPasswordFormProps {
   /** Told to password managers, so that they keep the password under the right name. */

@@ -3,7 +3,7 @@ import type { Group, Supply } from '../../../panel/panelSchema';
 
 /** Every terminal at which a supply is measured. */
 export const polesOf = (supply: Supply): string[] =>
-  Object.values(supply.terminals).filter((terminal) => terminal !== undefined);
+  Object.values<string | undefined>(supply.terminals).filter((terminal) => terminal !== undefined);
 
 /** The terminal of the pole that the group's common is wired to; undefined where the panel file does not tell. */
 function commonPole({ common, phase }: Group, { terminals }: Supply): string | undefined {

@@ -11,9 +11,7 @@ export function useReadiness(job: string): {
   const store = useDeviceStore();
   const [readiness, setReadiness] = useState<Readiness>();
   const [mending, setMending] = useState<ReadinessCheck>();
-  const look = useCallback(async () => {
-    setReadiness(await store.readiness(job));
-  }, [store, job]);
+  const look = useCallback(() => store.readiness(job).then(setReadiness), [store, job]);
   useEffect(() => {
     void look();
     return store.subscribe(() => void look());
