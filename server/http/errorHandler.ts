@@ -1,12 +1,10 @@
 /** Turns what was thrown into application/problem+json; a fault is logged and told without its inside. */
-import type { ErrorRequestHandler, Request } from 'express';
+import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
 import type { Language, Problem } from '../../shared/api/common';
 import { render } from '../../shared/wording/render';
-import { Refused } from './refused';
-
-const languageOf = (request: Request): Language =>
-  request.user?.language ?? (request.acceptsLanguages('en', 'es') === 'es' ? 'es' : 'en');
+import { languageOf } from './language';
+import { Refused, type PathError } from './refused';
 
 /** What Express and its body parsers throw carries a status and a type. */
 function fromParser(error: unknown): Refused | null {
@@ -18,13 +16,21 @@ function fromParser(error: unknown): Refused | null {
   return null;
 }
 
+const inWords =
+  (language: Language) =>
+  ({ path, says }: PathError) => ({
+    path,
+    says: typeof says === 'string' ? says : render(language, says),
+  });
+
 function problemOf(refused: Refused, language: Language): Problem {
   return {
     type: `urn:coldloop:problem:${refused.code}`,
     title: render(language, { key: `problem.${refused.code}`, params: refused.params }),
     status: refused.status,
     code: refused.code,
-    ...(refused.errors.length > 0 ? { errors: refused.errors } : {}),
+    ...(refused.errors.length > 0 ? { errors: refused.errors.map(inWords(language)) } : {}),
+    ...refused.facts,
   };
 }
 

@@ -4,7 +4,8 @@ import type { WordingKey } from '../../shared/wording/render';
 
 export interface PathError {
   path: string;
-  says: string;
+  /** A text is rendered in the language of who asked. */
+  says: string | Text;
 }
 export type ProblemCode =
   Extract<WordingKey, `problem.${string}`> extends `problem.${infer Code}` ? Code : never;
@@ -17,6 +18,8 @@ export class Refused extends Error {
     readonly params: Text['params'] = {},
     readonly errors: PathError[] = [],
     readonly headers: Record<string, string> = {},
+    /** What a program needs to go on, beside the problem's own members. */
+    readonly facts: Record<string, unknown> = {},
   ) {
     super(code);
   }

@@ -43,6 +43,7 @@ export class Panels1764547260000 implements MigrationInterface {
       CREATE TRIGGER panel_revision_no_truncate BEFORE TRUNCATE ON panel_revision
         FOR EACH STATEMENT EXECUTE FUNCTION refuse_change();
       REVOKE UPDATE, DELETE ON panel_revision FROM coldloop_app;
+      REVOKE DELETE ON panel FROM coldloop_app;
     `);
   }
 

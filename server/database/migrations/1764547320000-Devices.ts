@@ -29,6 +29,7 @@ export class Devices1764547320000 implements MigrationInterface {
       CREATE TRIGGER device_key_no_truncate BEFORE TRUNCATE ON device_key
         FOR EACH STATEMENT EXECUTE FUNCTION refuse_change();
       REVOKE UPDATE, DELETE ON device_key FROM coldloop_app;
+      REVOKE DELETE ON device FROM coldloop_app;
     `);
   }
 

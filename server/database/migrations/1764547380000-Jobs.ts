@@ -61,16 +61,16 @@ export class Jobs1764547380000 implements MigrationInterface {
         job uuid NOT NULL REFERENCES job,
         content text NOT NULL,
         made_at timestamptz NOT NULL,
-        made_by uuid NOT NULL REFERENCES person
+        made_by uuid NOT NULL REFERENCES person,
+        UNIQUE (job, digest)
       );
-      CREATE INDEX pack_job ON pack (job);
-      ALTER TABLE job ADD CONSTRAINT job_pack_fkey FOREIGN KEY (pack) REFERENCES pack;
+      ALTER TABLE job ADD CONSTRAINT job_pack_fkey FOREIGN KEY (id, pack) REFERENCES pack (job, digest);
       CREATE TRIGGER pack_append_only BEFORE UPDATE OR DELETE ON pack
         FOR EACH ROW EXECUTE FUNCTION refuse_change();
       CREATE TRIGGER pack_no_truncate BEFORE TRUNCATE ON pack
         FOR EACH STATEMENT EXECUTE FUNCTION refuse_change();
       REVOKE UPDATE, DELETE ON pack FROM coldloop_app;
-      REVOKE DELETE ON job, job_person FROM coldloop_app;
+      REVOKE DELETE ON job, job_person, job_counter FROM coldloop_app;
     `);
   }
 

@@ -13,16 +13,19 @@ export class Entries1764547440000 implements MigrationInterface {
         hash text NOT NULL CHECK (hash ~ '^[0-9a-f]{64}$'),
         previous text CHECK (previous ~ '^[0-9a-f]{64}$'),
         kind text NOT NULL,
-        pack text NOT NULL REFERENCES pack,
+        pack text NOT NULL,
         key uuid NOT NULL REFERENCES device_key,
         content text NOT NULL CHECK (octet_length(content) <= 65536),
         received_at timestamptz NOT NULL,
         after_access boolean NOT NULL,
+        FOREIGN KEY (job, pack) REFERENCES pack (job, digest),
         UNIQUE (job, "order"),
         CHECK ((previous IS NULL) = (seq = 1))
       );
       CREATE UNIQUE INDEX entry_log_hash ON entry (log, hash);
       CREATE INDEX entry_log_seq ON entry (log, seq);
+      CREATE INDEX entry_signed ON entry (job) WHERE kind = 'signed';
+      CREATE INDEX entry_key_received ON entry (key, received_at);
 
       CREATE TABLE entry_set_aside (
         id uuid NOT NULL,

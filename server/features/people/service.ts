@@ -177,6 +177,11 @@ export class PeopleService {
     });
   }
 
+  /** Ends every session of these people; they sign in again with their password. */
+  async endSessions(tx: EntityManager, people: readonly string[]): Promise<void> {
+    await tx.increment(PersonEntity, { id: In([...people]) }, 'epoch', 1);
+  }
+
   /** An administrator speaks for their own sites only; roles elsewhere stay as they are. */
   private async replaceRoles(
     tx: EntityManager,
