@@ -22,7 +22,12 @@ export const problem = z.object({
 export type Problem = z.infer<typeof problem>;
 
 export const pageQuery = z.object({
-  after: z.string().max(200).optional(),
+  // A zero character is no text to PostgreSQL.
+  after: z
+    .string()
+    .max(200)
+    .refine((value) => !value.includes('\u0000'))
+    .optional(),
   limit: z.coerce.number().int().min(1).max(200).default(50),
 });
 export const page = <T extends z.ZodType>(item: T) =>

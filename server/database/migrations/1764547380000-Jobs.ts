@@ -15,6 +15,10 @@ export class Jobs1764547380000 implements MigrationInterface {
         number integer NOT NULL CHECK (number > 0),
         panel uuid NOT NULL,
         revision integer NOT NULL,
+        panel_tag text NOT NULL,
+        panel_name text NOT NULL,
+        panel_points integer NOT NULL,
+        isolators jsonb NOT NULL,
         scope jsonb NOT NULL CHECK (jsonb_array_length(scope) > 0),
         foreman uuid NOT NULL REFERENCES person,
         due date NOT NULL,
@@ -30,6 +34,7 @@ export class Jobs1764547380000 implements MigrationInterface {
         cancelled_by uuid REFERENCES person,
         cancel_words text,
         record uuid,
+        sealed_at timestamptz,
         last_order integer NOT NULL DEFAULT 0 CHECK (last_order >= 0),
         last_heard timestamptz,
         status text NOT NULL DEFAULT 'planned' CHECK (status IN
@@ -41,6 +46,7 @@ export class Jobs1764547380000 implements MigrationInterface {
         UNIQUE (site, number),
         CHECK ((pack IS NULL) = (sent_at IS NULL)),
         CHECK ((cancelled_at IS NULL) = (cancel_words IS NULL)),
+        CHECK ((record IS NULL) = (sealed_at IS NULL)),
         CHECK (record IS NULL OR pack IS NOT NULL)
       );
       CREATE INDEX job_panel ON job (panel, created_at);

@@ -8,10 +8,9 @@ export interface Progress {
   stageDone: number;
   stageOf: number;
   stagesDone: number;
-  /** Locks known on, with the id of their owner. */
+  /** Locks known on, with the name of their owner. */
   locks: { isolator: string; lock: string; person: string }[];
   waiting: JobRow['waiting'];
-  isolators: string[];
 }
 
 @Entity('job_counter')
@@ -34,6 +33,16 @@ export class JobEntity {
   panel!: string;
   @Column({ type: 'integer' })
   revision!: number;
+  /** Of the pinned revision, which never changes. */
+  @Column({ type: 'text', name: 'panel_tag' })
+  panelTag!: string;
+  @Column({ type: 'text', name: 'panel_name' })
+  panelName!: string;
+  @Column({ type: 'integer', name: 'panel_points' })
+  panelPoints!: number;
+  /** Of the lock plan, in opening order. */
+  @Column({ type: 'jsonb' })
+  isolators!: string[];
   @Column({ type: 'jsonb' })
   scope!: string[];
   @Column({ type: 'uuid' })
@@ -65,6 +74,8 @@ export class JobEntity {
   cancelWords!: string | null;
   @Column({ type: 'uuid', nullable: true })
   record!: string | null;
+  @Column({ type: 'timestamptz', name: 'sealed_at', nullable: true })
+  sealedAt!: Date | null;
   /** Order of the newest entry; raised under this row's lock, so that order is commit order. */
   @Column({ type: 'integer', name: 'last_order', default: 0 })
   lastOrder!: number;
