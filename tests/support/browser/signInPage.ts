@@ -1,0 +1,12 @@
+import type { Page } from 'playwright-core';
+import { en } from '../../../shared/wording/en';
+import { paths } from '../../../src/app/paths';
+import { testPassword } from '../seedPeople';
+
+export async function signInOnPage(page: Page, email: string): Promise<void> {
+  await page.goto(paths.signIn);
+  await page.getByLabel(en['app.signIn.email']).fill(email);
+  await page.getByLabel(en['app.signIn.password']).fill(testPassword);
+  await page.getByRole('button', { name: en['app.signIn'] }).click();
+  await page.waitForURL((url) => url.pathname !== paths.signIn);
+}
