@@ -16,10 +16,9 @@ export interface ExpectedOhms {
   high: number;
 }
 
-/** Expected `2·R′·l` ± the larger of 20 % and 0.5 ohm; undefined where the size has no known resistance. */
-export function loopOhms(cable: Cable): ExpectedOhms | undefined {
+/** Expected `2·R′·l` ± the larger of 20 % and 0.5 ohm. */
+export function loopOhms(cable: Cable): ExpectedOhms {
   const perKm = ohmPerKm(cable, coldC);
-  if (perKm === undefined) return undefined;
   const ohm = (2 * perKm * cable.lengthM) / 1000;
   const spread = Math.max(ohm * share, leastOhm);
   return {

@@ -1,5 +1,7 @@
-/** The resistance of a cable's conductor: the one place where the checklist will ask the conductor tables. */
+/** The resistance of a cable's conductor: the one place where the checklist asks the conductor tables. */
+import { conductorResistance } from '../electrical/conductorResistance';
 import type { Cable } from '../panel/device';
 
-/** Ohm per km at a temperature. Undefined for every cable while the tables are not there: steps then carry no limit that hangs on it. */
-export const ohmPerKm = (_cable: Cable, _tempC: number): number | undefined => undefined;
+/** Ohm per km at a temperature. A conductor of unstated class is taken as flexible: of the two it resists more. */
+export const ohmPerKm = ({ size, conductor = 'class5' }: Cable, tempC: number): number =>
+  conductorResistance(size, conductor, tempC);

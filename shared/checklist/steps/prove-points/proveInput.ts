@@ -4,6 +4,7 @@ import { choice } from '../../asks';
 import type { PointFacts } from '../../facts';
 import { cableDrop } from '../../cableDrop';
 import { deviceName } from '../../device';
+import { inputAmps } from '../../inputAmps';
 import { liveMeasuring } from '../../liveSignal';
 import { makeStep } from '../../makeStep';
 import { offVolts } from '../../offVolts';
@@ -32,8 +33,10 @@ export function proveInput(worked: PointFacts, stage: Stage): Step[] {
       picture: worked.loop,
     });
   const reading = (window: Window): Ask => ({ kind: 'reading', unit, ...window });
-  const drop = 'ratedmA' in io && io.ratedmA !== undefined ? cableDrop(point.cable, io.ratedmA / 1000) : 0;
-  const off = io.kind === 'digital-input' ? inputOff(io, offVolts(io)) : {};
+  const input = io.kind === 'digital-input' || io.kind === 'opto-input' ? io : undefined;
+  const amps = input && inputAmps(input, supply?.V ?? 0);
+  const drop = amps === undefined ? undefined : cableDrop(point.cable, amps);
+  const off = inputOff(input && offVolts(input));
   return [
     part('on', choice(['light-and-bit-on'], ['light-or-bit-off'])),
     part('on-volts', reading(inputOn(worked, drop)), liveMeasuring(supply)),

@@ -1,6 +1,5 @@
 /** The volts to expect at a terminal when a point is on and off, each with its sum. */
 import type { Device } from '../../../panel/device';
-import type { DigitalInput } from '../../../panel/moduleIo';
 import type { Supply } from '../../../panel/panelSchema';
 import { say, type Text } from '../../../panel/says';
 import type { PointFacts } from '../../facts';
@@ -48,9 +47,10 @@ export const inputOn = (worked: PointFacts, cable: number | undefined): Window =
   switchedOn(worked.supply, totalDrop(worked), cable, 'checklist.why.input-on');
 
 /** At most the module's own off voltage, either way round; without it no limit. */
-export function inputOff(io: DigitalInput, offV: number | undefined): Window {
-  const high = io.thresholds?.UL_V ?? offV;
-  return high === undefined ? {} : { low: -high, high, why: say('checklist.why.input-off', { V: high }) };
+export function inputOff(offV: number | undefined): Window {
+  if (offV === undefined) return {};
+  const high = inThousandths(offV);
+  return { low: -high, high, why: say('checklist.why.input-off', { V: high }) };
 }
 
 // Default drop-out of a coil: 10 % DC, 15 % AC of its rated volts (wiring.md, from memory).
