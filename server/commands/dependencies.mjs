@@ -19,10 +19,11 @@ export function ensureDependencies() {
     .update(readFileSync(resolve(root, 'package-lock.json')))
     .digest('hex');
   if (existsSync(stampFile) && readFileSync(stampFile, 'utf8') === lock) return;
-  console.log('Installing dependencies ...');
+  // On standard error: a command's own answer may be read by a program.
+  console.error('Installing dependencies ...');
   const npm = process.env.npm_execpath;
   const [command, args] = npm ? [process.execPath, [npm, 'ci']] : ['npm', ['ci']];
-  const done = spawnSync(command, args, { cwd: root, stdio: 'inherit' });
+  const done = spawnSync(command, args, { cwd: root, stdio: ['inherit', 2, 'inherit'] });
   if (done.status !== 0) {
     console.error('The dependencies could not be installed. Nothing else was started.');
     process.exit(done.status ?? 1);

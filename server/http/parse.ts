@@ -1,13 +1,9 @@
 /** The edge: what came in is parsed by a schema of the contract, or refused with every path and reason. */
 import { z } from 'zod';
+import { schemaErrors } from '../../shared/panel/schemaErrors';
 import { Refused, type PathError } from './refused';
 
-export const pathErrors = (error: z.ZodError): PathError[] =>
-  error.issues.flatMap((issue) =>
-    issue.code === 'unrecognized_keys'
-      ? issue.keys.map((key) => ({ path: [...issue.path, key].join('.'), says: 'is not known here' }))
-      : [{ path: issue.path.join('.'), says: issue.message }],
-  );
+export const pathErrors = (error: z.ZodError): PathError[] => schemaErrors(error);
 
 /** A person mends the first errors; ten thousand of them would only hide those. */
 const mostErrors = 200;

@@ -1,9 +1,9 @@
 /** Sources that are not electrical, and the valves, blocks and pins that hold them back. */
-import type { Panel, Source } from '../panel/panelSchema';
+import { electricalSources, type Panel, type Source } from '../panel/panelSchema';
 import { countsAsIsolation } from './countsAsIsolation';
 import { isolatorsByTag } from './isolatorsByTag';
 
-const electrical: Source['kind'][] = ['feeder', 'other-panel', 'battery', 'generator'];
+const electrical: readonly Source['kind'][] = electricalSources;
 
 export const otherEnergySources = (panel: Panel): Source[] =>
   panel.sources.filter((source) => !electrical.includes(source.kind));

@@ -7,7 +7,8 @@ import { nonNegative, positive, tag, text } from './units';
 export const maxPoints = 20_000;
 export const maxPanelBytes = 40 * 1024 * 1024;
 
-const electricalSources = ['feeder', 'other-panel', 'battery', 'generator'] as const;
+/** Kinds of source that make something live; the others are blocked and released. */
+export const electricalSources = ['feeder', 'other-panel', 'battery', 'generator'] as const;
 const otherSources = ['pneumatic', 'hydraulic', 'gravity', 'spring', 'thermal'] as const;
 
 export const source = z.strictObject({
@@ -172,7 +173,7 @@ export const panelSchema = z.strictObject({
   supplies: z.array(supply),
   modules: z.array(panelModule),
   groups: z.array(group),
-  points: z.array(point).max(maxPoints),
+  points: z.array(point).max(maxPoints, `holds more than ${maxPoints} points`),
   stopControls: z.array(stopControl),
 });
 

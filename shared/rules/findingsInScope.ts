@@ -1,5 +1,5 @@
 /** Which findings concern a job: those in the supplies, groups, modules or lock plan of its points. */
-import type { Panel } from '../panel/panelSchema';
+import { electricalSources, type Panel, type Source } from '../panel/panelSchema';
 import { isAccepted, blocking, type Accepted } from './blocking';
 import type { Finding } from './finding';
 
@@ -18,6 +18,12 @@ function upstream(panel: Panel, from: Iterable<string>): Set<string> {
   for (const tag of reached) for (const feeder of feeds.get(tag) ?? []) reached.add(feeder);
   return reached;
 }
+
+/** Air, oil, weights, springs and heat concern every job on the panel: the file does not say what they move. */
+const otherEnergy = ({ sources }: Panel): string[] => {
+  const electrical: readonly Source['kind'][] = electricalSources;
+  return sources.filter(({ kind }) => !electrical.includes(kind)).map(({ tag }) => tag);
+};
 
 /** The worked points, and whatever shares a group or a module with them. */
 function scopeOf(panel: Panel, addresses: readonly string[]): Scope {
@@ -40,7 +46,7 @@ function scopeOf(panel: Panel, addresses: readonly string[]): Scope {
     ]),
   ]);
   const points = new Set([...asked, ...neighbours.map(({ address }) => address)]);
-  return { points, groups, modules, supplies, sources: supplies };
+  return { points, groups, modules, supplies, sources: new Set([...supplies, ...otherEnergy(panel)]) };
 }
 
 /**

@@ -11,6 +11,7 @@ import { office } from './en/office';
 import { records } from './en/records';
 import { mail } from './en/mail';
 import { problems } from './en/problems';
+import { check } from './en/check';
 
 export const en = {
   ...findings,
@@ -25,4 +26,5 @@ export const en = {
   ...records,
   ...mail,
   ...problems,
+  ...check,
 } as const;

@@ -12,6 +12,7 @@ import { office } from './es/office';
 import { records } from './es/records';
 import { mail } from './es/mail';
 import { problems } from './es/problems';
+import { check } from './es/check';
 
 export const es = {
   ...findings,
@@ -26,4 +27,5 @@ export const es = {
   ...records,
   ...mail,
   ...problems,
+  ...check,
 } as const satisfies Record<keyof typeof en, string>;

@@ -1,0 +1,26 @@
+export const check = {
+  'check.panel':
+    'Panel {panel}, {points, plural, one {# point} other {# points}}. Rules {ruleSet}. Digest {digest}.',
+  'check.ran':
+    '{checks, plural, one {# check} other {# checks}}, {waiting, plural, =0 {all could run} one {# could not run} other {# could not run}}.',
+  'check.waits': 'Could not run: {rule} at {place}. {missing} is missing.',
+  'check.no-findings': 'Nothing was found by the checks that ran.',
+  'check.sum': '{name} {value} {unit} ({basis})',
+  'check.remedy': 'Do this: {remedy}',
+  'check.plan': 'Open and lock, in this order: {isolators}.',
+  'check.plan.nothing': 'Nothing has to be opened.',
+  'check.no-plan': 'No safe isolation exists. No job may start on these points.',
+  'check.tell': 'Tell people first: {tell}.',
+  'check.guarded': 'Stays live behind its guard: {supplies}.',
+  'check.still-live': 'Still live with {open} open:',
+  'check.still-live.nothing-open': 'Live with nothing open:',
+  'check.dark': 'Nothing is live with {open} open.',
+  'check.live': '{place}: {V} V by {path}',
+  'check.maybe-live': '{place}: may be live, {V} V by {path}',
+  'check.dead-tests': '{count, plural, one {# pair} other {# pairs}} to read dead.',
+  'check.wait': '{supply}: wait {t60S} s before you come near (60 V), {t1S} s until it should read dead.',
+  'check.wait.stated': '{supply}: wait {statedS} s, as its maker states.',
+  'check.wait.unknown': '{supply}: stores charge and no time is known. Measure it.',
+  'check.steps': '{steps, plural, one {# step} other {# steps}} in the checklist.',
+  'check.stage': '{stage}: {steps}',
+} as const;
