@@ -1,6 +1,9 @@
 /** Every wiring rule, in the order in which their findings are listed. */
+import { dataRules } from './dataRules';
+import { inputRules } from './inputRules';
 import type { Rule } from './rule';
+import { supplyRules } from './supplyRules';
 
 export const ruleSetVersion = '2026.1';
 
-export const rules: readonly Rule[] = [];
+export const rules: readonly Rule[] = [...supplyRules, ...inputRules, ...dataRules];

@@ -1,0 +1,4 @@
+/** The rules of the data themselves. */
+import type { Rule } from './rule';
+
+export const dataRules: readonly Rule[] = [];
