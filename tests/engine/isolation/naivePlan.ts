@@ -69,6 +69,7 @@ export function naive(panel: Panel, scope: readonly string[]): Naive {
     panel.supplies.map((one) => one.tag).filter((tag) => feedsItself(panel, tag) && !hasOrigin(panel, tag)),
   );
   const isolators = new Map(panel.isolators.map((one) => [one.tag, one]));
+  const known = new Set([...panel.sources, ...panel.supplies].map((one) => one.tag));
   const cutters = new Map(
     panel.supplies.flatMap((fed) =>
       fed.feeds.map((feed) => [
@@ -85,6 +86,8 @@ export function naive(panel: Panel, scope: readonly string[]): Naive {
     if (!fed || fed.feeds.length === 0 || circles.has(tag)) return true;
     const further = [...asked, tag];
     const byFeed = fed.feeds.some((feed) => {
+      // "A feed from nowhere is always live": whatever is drawn between nowhere and here.
+      if (!known.has(feed.from)) return true;
       if ((cutters.get(feed) ?? []).some((one) => open.has(one))) return false;
       return panel.sources.some((one) => one.tag === feed.from) || alive(feed.from, open, further);
     });
