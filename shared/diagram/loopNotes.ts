@@ -3,6 +3,7 @@ import type { Cable } from '../panel/device';
 import type { Panel } from '../panel/panelSchema';
 import { say, type Text } from '../panel/says';
 import type { LoopFacts } from './loopFacts';
+import { figures, loopValues, type LoopValue } from './loopValues';
 import { fuseWords } from './rails';
 import { ohms } from './sideBranches';
 
@@ -51,6 +52,15 @@ export function fittedNotes({ point }: LoopFacts): Text[] {
   ];
 }
 
+function valueNotes(facts: LoopFacts): Text[] {
+  const values = loopValues(facts);
+  if (!values) return [];
+  const { supplyV, on, off } = values;
+  const note = (state: 'on' | 'off', { V, mA }: LoopValue) =>
+    say(`diagram.values.${state}`, { supplyV, V: figures(V), mA: figures(mA) });
+  return [...(on ? [note('on', on)] : []), ...(off ? [note('off', off)] : [])];
+}
+
 /** On a three-wire sensor the file does not say which of its wires the point's fuse is in. */
 const fuseNote = ({ point, field }: LoopFacts): Text[] =>
   point.fuse && field === 'both-poles'
@@ -60,6 +70,7 @@ const fuseNote = ({ point, field }: LoopFacts): Text[] =>
 export function loopNotes(panel: Panel, facts: LoopFacts): Text[] {
   const { point } = facts;
   return [
+    ...valueNotes(facts),
     ...fuseNote(facts),
     ...(point.cable ? cableNote(point.cable) : []),
     ...fittedNotes(facts),

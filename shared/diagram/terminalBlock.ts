@@ -2,6 +2,7 @@
 import { x, type Frame } from './frame';
 import { wiresOf, type LoopFacts } from './loopFacts';
 import { box, line, tagLabel, type Primitive } from './primitives';
+import { figures, loopValues } from './loopValues';
 import { fuseWords } from './rails';
 import { arrowHead } from './symbols/switches';
 
@@ -25,6 +26,15 @@ function fuseInSignal({ point, poles, field }: LoopFacts, { signal }: Frame, fro
     line('thin', [from + 7, signal], [from + 33, signal]),
     tagLabel([from + 4, signal - 12], fuseWords(point.fuse), { size: 12, room: 76 }),
   ];
+}
+
+/** What the closed loop carries, under or over the number of the wire. */
+function currentLabel(facts: LoopFacts, { signal, columnSide }: Frame, middle: number): Primitive[] {
+  const on = loopValues(facts)?.on;
+  // Foreign voltage stands where the current would, and its picture matters more.
+  if (!on || facts.point.otherSupply !== 'none') return [];
+  const y = columnSide === 1 ? signal + 39 : signal - 41;
+  return [tagLabel([middle, y], `${figures(on.mA)} mA`, { anchor: 'middle', size: 12, room: 62 })];
 }
 
 /** The conductor from the field side, which ends at `from`, to the terminal. */
@@ -53,6 +63,7 @@ export function terminalBlock(facts: LoopFacts, frame: Frame, from: number, mark
       },
     ),
     tagLabel([middle, signal - 11], wire?.colour ?? '', { anchor: 'middle', bold: true, room }),
+    ...currentLabel(facts, frame, middle),
     ...fused,
     box([x.terminal, signal], 40, 34, marked ? 'ink' : 'sheet'),
     tagLabel([x.terminal, signal + 5], number(facts.point.terminal), {

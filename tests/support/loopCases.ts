@@ -22,7 +22,7 @@ const common = { otherSupply: 'none', description: 'Level high', wire: '3014' };
 /** Every case by name; the point's address is the name. */
 export function loopCases(): Panel {
   const small = smallPanel();
-  const input = { kind: 'digital-input', V: 24, current: 'dc', type: 3, ratedmA: 2.5 };
+  const input = { kind: 'digital-input', V: 24, current: 'dc', type: 3, ratedmA: 2.5, inputOhm: 6800 };
   const output = { kind: 'digital-output', Vmin: 5, Vmax: 250, pointA: 2 };
   return panelSchema.parse({
     ...small,
