@@ -34,7 +34,13 @@ function currentLabel(facts: LoopFacts, { signal, columnSide }: Frame, middle: n
   // Foreign voltage stands where the current would, and its picture matters more.
   if (!on || facts.point.otherSupply !== 'none') return [];
   const y = columnSide === 1 ? signal + 39 : signal - 41;
-  return [tagLabel([middle, y], `${figures(on.mA)} mA`, { anchor: 'middle', size: 12, room: 62 })];
+  return [
+    tagLabel([middle, y], `${figures(on.mA)} mA`, {
+      anchor: 'middle',
+      size: 12,
+      room: facts.field === 'both-poles' ? 46 : 62,
+    }),
+  ];
 }
 
 /** The conductor from the field side, which ends at `from`, to the terminal. */
