@@ -16,6 +16,8 @@ interface RequestOptions {
   body?: unknown;
   signal?: AbortSignal;
   timeoutMs?: number;
+  /** Another network than the page's own, for tests and the simulation. */
+  fetch?: typeof fetch;
 }
 
 /** The sender also runs where there is no document (a worker, a test). */
@@ -36,7 +38,7 @@ async function problemOf(response: Response): Promise<Problem> {
 export async function request<S extends z.ZodType>(
   schema: S,
   url: string,
-  { method = 'GET', body, signal, timeoutMs = 15_000 }: RequestOptions = {},
+  { method = 'GET', body, signal, timeoutMs = 15_000, fetch: call = fetch }: RequestOptions = {},
 ): Promise<z.infer<S>> {
   const timeout = AbortSignal.timeout(timeoutMs);
   const init: RequestInit = {
@@ -51,7 +53,7 @@ export async function request<S extends z.ZodType>(
     },
     ...(body === undefined ? {} : { body: JSON.stringify(body) }),
   };
-  const response = await fetch(url, init).catch((cause: unknown) => {
+  const response = await call(url, init).catch((cause: unknown) => {
     throw new UnreachableError('no answer from the server', { cause });
   });
   if (!response.ok) throw new ProblemError(await problemOf(response));

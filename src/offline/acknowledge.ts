@@ -3,10 +3,7 @@ import type { Databases } from './databases';
 import { keepEntries, type HeldEntry } from './keepEntries';
 
 async function copyToWork({ work }: Databases, job: string, held: HeldEntry[]): Promise<void> {
-  await work.run(async (database) => {
-    const transaction = database.transaction(['jobs', 'entries', 'logs'], 'readwrite', {
-      durability: 'strict',
-    });
+  await work.write(['jobs', 'entries', 'logs'], async (transaction) => {
     // Without the job's row the vector has nowhere to live; the pull that brings the row counts again.
     const row = (await transaction.objectStore('jobs').get(job)) ?? {
       job,
@@ -18,18 +15,15 @@ async function copyToWork({ work }: Databases, job: string, held: HeldEntry[]): 
     };
     const moved = await keepEntries(transaction, row, held);
     if (row.pack !== '') await transaction.objectStore('jobs').put(moved);
-    await transaction.done;
   });
 }
 
 async function dropFromOutbox({ outbox }: Databases, ids: string[]): Promise<void> {
-  await outbox.run(async (database) => {
-    const transaction = database.transaction(['entries', 'attention'], 'readwrite', { durability: 'strict' });
+  await outbox.write(['entries', 'attention'], async (transaction) => {
     for (const id of ids) {
       await transaction.objectStore('entries').delete(id);
       await transaction.objectStore('attention').delete(id);
     }
-    await transaction.done;
   });
 }
 

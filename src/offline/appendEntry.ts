@@ -34,17 +34,13 @@ async function packOf(work: Work, job: string): Promise<string> {
 
 /** False when the log has moved on since `base` was read: nothing was written then. */
 async function addToOutbox(outbox: Outbox, entry: Entry, base: LogHead | undefined, head: LogHead) {
-  return outbox.run(async (database) => {
-    const transaction = database.transaction(['entries', 'heads'], 'readwrite', { durability: 'strict' });
+  return outbox.write(['entries', 'heads'], async (transaction) => {
     const current = await transaction.objectStore('heads').get(entry.log);
     // The same hash already there: the first try was kept and only its connection was lost.
     if (current?.hash === head.hash) return true;
     if (current?.hash !== base?.hash) return false;
-    await Promise.all([
-      transaction.objectStore('entries').add(entry),
-      transaction.objectStore('heads').put(head),
-      transaction.done,
-    ]);
+    await transaction.objectStore('entries').add(entry);
+    await transaction.objectStore('heads').put(head);
     return true;
   });
 }

@@ -4,16 +4,12 @@ import type { Channel } from './environment';
 export class Changes {
   private readonly listeners = new Set<() => void>();
 
-  /** @param reread runs before the listeners when another tab changed something */
+  /** @param reread runs before the listeners; when it fails they are told all the same, and meet the fault themselves */
   constructor(
     private readonly channel: Channel,
     private readonly reread: () => Promise<void>,
   ) {
-    channel.listen(() => {
-      void this.reread().then(() => {
-        this.notify();
-      });
-    });
+    channel.listen(() => void this.refresh());
   }
 
   subscribe(listener: () => void): () => void {
@@ -26,10 +22,18 @@ export class Changes {
     for (const listener of this.listeners) listener();
   }
 
-  /** Something stored has changed: this tab and all others. */
+  /** Something stored has changed: this tab and all others. Never throws. */
   async announce(): Promise<void> {
-    await this.reread();
-    this.notify();
     this.channel.post('changed');
+    await this.refresh();
+  }
+
+  close(): void {
+    this.channel.close();
+  }
+
+  private async refresh(): Promise<void> {
+    await this.reread().catch(() => undefined);
+    this.notify();
   }
 }

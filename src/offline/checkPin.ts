@@ -26,16 +26,15 @@ export class PinCheck {
 
   /** Counts the try as wrong before it is looked at, so that neither two tabs nor a reload give free tries. */
   private async begin(person: string): Promise<{ row: EnrolledPerson; waitMs: number } | null> {
-    return this.outbox.run(async (database) => {
-      const transaction = database.transaction('people', 'readwrite', { durability: 'strict' });
-      const row = await transaction.store.get(person);
+    return this.outbox.write(['people'], async (transaction) => {
+      const people = transaction.objectStore('people');
+      const row = await people.get(person);
       if (!row) return null;
       const waitMs = this.waitMs(row);
       if (waitMs > 0) return { row, waitMs };
       const wrong = row.wrong + 1;
       const counted = { ...row, wrong, waitUntil: this.env.now() + pinDelayMs(wrong) };
-      await transaction.store.put(counted);
-      await transaction.done;
+      await people.put(counted);
       this.notBefore.set(person, this.env.monotonic() + pinDelayMs(wrong));
       return { row: counted, waitMs: 0 };
     });
@@ -50,11 +49,10 @@ export class PinCheck {
 
   private async clear(person: string): Promise<void> {
     this.notBefore.delete(person);
-    await this.outbox.run(async (database) => {
-      const transaction = database.transaction('people', 'readwrite', { durability: 'strict' });
-      const row = await transaction.store.get(person);
-      if (row) await transaction.store.put({ ...row, wrong: 0, waitUntil: 0 });
-      await transaction.done;
+    await this.outbox.write(['people'], async (transaction) => {
+      const people = transaction.objectStore('people');
+      const row = await people.get(person);
+      if (row) await people.put({ ...row, wrong: 0, waitUntil: 0 });
     });
   }
 }

@@ -38,6 +38,33 @@ export class Connection<S extends DBSchema> {
     }
   }
 
+  /**
+   * One read-write transaction on disk: resolves with what `work` answers when the transaction has completed,
+   * rejects with why it did not. `work` may await nothing but its own requests.
+   */
+  write<N extends StoreNames<S>, T>(
+    stores: N[],
+    work: (transaction: IDBPTransaction<S, N[], 'readwrite'>) => Promise<T>,
+  ): Promise<T> {
+    return this.run(async (database) => {
+      const transaction = database.transaction(stores, 'readwrite', { durability: 'strict' });
+      const ended = transaction.done.then(
+        () => undefined,
+        (error: unknown) => error,
+      );
+      try {
+        const answer = await work(transaction);
+        await transaction.done;
+        return answer;
+      } catch (error) {
+        abort(transaction);
+        await ended;
+        // A full disk aborts the whole transaction: its own error says why, those of its requests do not.
+        throw transaction.error ?? error;
+      }
+    });
+  }
+
   async close(): Promise<void> {
     const opening = this.opening;
     this.opening = null;
@@ -46,37 +73,58 @@ export class Connection<S extends DBSchema> {
   }
 
   private open(): Promise<IDBPDatabase<S>> {
-    this.opening ??= this.request().catch((error: unknown) => {
-      this.opening = null;
-      throw error;
+    if (this.opening) return this.opening;
+    const opening = this.request(() => {
+      if (this.opening === opening) this.opening = null;
     });
-    return this.opening;
+    this.opening = opening;
+    opening.catch(() => {
+      if (this.opening === opening) this.opening = null;
+    });
+    return opening;
   }
 
-  private request(): Promise<IDBPDatabase<S>> {
-    const { name, version, upgrade } = this.spec;
+  private request(lost: () => void): Promise<IDBPDatabase<S>> {
+    const { name, version } = this.spec;
     const request = this.factory.open(name, version);
     request.addEventListener('upgradeneeded', ({ oldVersion }) => {
       const transaction = request.transaction;
       if (!transaction) throw new Error('an upgrade without its transaction');
-      upgrade(wrap(request.result) as unknown as IDBPDatabase<S>, oldVersion, wrap(transaction) as never);
+      this.spec.upgrade(
+        wrap(request.result) as unknown as IDBPDatabase<S>,
+        oldVersion,
+        wrap(transaction) as never,
+      );
     });
-    const blocked = new Promise<never>((_, reject) => {
+    return new Promise((resolve, reject) => {
+      let isBlocked = false;
       request.addEventListener('blocked', () => {
+        isBlocked = true;
         reject(new DatabaseBlockedError(`another tab keeps "${name}" open`));
       });
-    });
-    const opened = wrap(request).then((database) => {
-      const drop = () => {
-        this.opening = null;
-      };
-      database.addEventListener('close', drop);
-      database.addEventListener('versionchange', () => {
-        database.close();
-        drop();
+      request.addEventListener('error', () => {
+        reject(request.error ?? new Error(`"${name}" cannot be opened`));
       });
-      return database as unknown as IDBPDatabase<S>;
+      request.addEventListener('success', () => {
+        const database = request.result;
+        database.addEventListener('close', lost);
+        database.addEventListener('versionchange', () => {
+          database.close();
+          lost();
+        });
+        // Nobody waits for it any more: kept open it would block the next version in its turn.
+        if (isBlocked) database.close();
+        else resolve(wrap(database) as unknown as IDBPDatabase<S>);
+      });
     });
-    return Promise.race([opened, blocked]);
+  }
+}
+
+/** Ends a transaction that is still running; one that has ended stays as it ended. */
+function abort(transaction: { abort(): void }): void {
+  try {
+    transaction.abort();
+  } catch (error) {
+    if (!(error instanceof Error && error.name === 'InvalidStateError')) throw error;
   }
 }

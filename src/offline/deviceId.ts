@@ -8,12 +8,11 @@ const key = 'device';
 /** One transaction, so two tabs that start together agree. */
 export async function deviceId(env: DeviceEnvironment, outbox: Outbox): Promise<string> {
   const made = v7({ msecs: env.now(), random: env.randomBytes(16) });
-  return outbox.run(async (database) => {
-    const transaction = database.transaction('settings', 'readwrite', { durability: 'strict' });
-    const kept = await transaction.store.get(key);
+  return outbox.write(['settings'], async (transaction) => {
+    const settings = transaction.objectStore('settings');
+    const kept = await settings.get(key);
     if (typeof kept === 'string') return kept;
-    await transaction.store.put(made, key);
-    await transaction.done;
+    await settings.put(made, key);
     return made;
   });
 }

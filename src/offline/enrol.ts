@@ -18,13 +18,17 @@ interface Person {
 
 /** The key this person already has here, or a new one; kept before it is registered, so a lost reply costs nothing. */
 async function keyFor(env: DeviceEnvironment, outbox: Outbox, person: string): Promise<DeviceKey> {
-  const [kept] = await outbox.run((database) => database.getAllFromIndex('keys', 'person', person));
-  if (kept) return kept;
   const pair = await env.subtle.generateKey(keyAlgorithm, false, ['sign', 'verify']);
   const key = v7({ msecs: env.now(), random: env.randomBytes(16) });
   const made = { key, person, pair, registered: false, madeAt: new Date(env.now()).toISOString() };
-  await outbox.run((database) => database.put('keys', made));
-  return made;
+  // Looked up and kept in one transaction, so two tabs that enrol together make one key.
+  return outbox.write(['keys'], async (transaction) => {
+    const keys = transaction.objectStore('keys');
+    const [kept] = await keys.index('person').getAll(person);
+    if (kept) return kept;
+    await keys.put(made);
+    return made;
+  });
 }
 
 /** Both requests carry ids made here and may be repeated. */
@@ -56,11 +60,9 @@ export async function enrol(
   await register(env, await deviceId(env, outbox), key);
   const verifier = await makeVerifier(env.subtle, pin, (length) => env.randomBytes(length));
   const enrolledAt = new Date(env.now()).toISOString();
-  await outbox.run(async (database) => {
-    const transaction = database.transaction(['keys', 'people'], 'readwrite', { durability: 'strict' });
+  await outbox.write(['keys', 'people'], async (transaction) => {
     await transaction.objectStore('keys').put({ ...key, registered: true });
     const row = { person, name, email, enrolledAt, key: key.key, verifier, wrong: 0, waitUntil: 0 };
     await transaction.objectStore('people').put(row);
-    await transaction.done;
   });
 }

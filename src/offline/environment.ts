@@ -1,4 +1,5 @@
 /** The outside world as the device store meets it, so that tests and the simulation can bring their own. */
+import type { Language } from '../../shared/api/common';
 
 export interface Channel {
   post(message: string): void;
@@ -16,8 +17,10 @@ export interface BrowserStorage {
 export interface Shell {
   /** `version` names the set of files; null when no worker controls the page or its set is not whole. */
   version(): Promise<string | null>;
-  /** Opens a path of this app with the network refused: the page and every script and style it names. */
-  opensOffline(path: string): Promise<boolean>;
+  /** Opens the app with the network refused: the page and every script, style and font it names. */
+  opensOffline(): Promise<boolean>;
+  /** Fetches what is missing of the set; needs the network. */
+  mend(): Promise<void>;
 }
 
 export interface DeviceEnvironment {
@@ -39,6 +42,8 @@ export interface DeviceEnvironment {
   /** Calls back when a round is worth trying: network back, page shown. The answer stops it. */
   onWake(run: () => void): () => void;
   isVisible(): boolean;
+  /** Language of the screen, for what the server says. */
+  language(): Language;
   storage: BrowserStorage;
   shell: Shell;
   /** What the person reads in the list of their devices, e.g. "Chrome on Android". */

@@ -16,7 +16,7 @@ async function wholeUpTo(transaction: KeepTransaction, log: string, from: number
   return seq;
 }
 
-/** Idempotent: an entry already held stays as it is. Answers the job's row with its vector moved; the caller puts it. */
+/** Idempotent; the server's newest word says what is set aside. Answers the job's row with its vector moved; the caller puts it. */
 export async function keepEntries(
   transaction: KeepTransaction,
   row: WorkJob,
@@ -25,7 +25,7 @@ export async function keepEntries(
   const store = transaction.objectStore('entries');
   for (const { entry, setAside } of held) {
     const { id, job, log, seq } = entry;
-    if ((await store.getKey(id)) === undefined) await store.put({ id, job, log, seq, entry, setAside });
+    await store.put({ id, job, log, seq, entry, setAside });
   }
   const vector = { ...row.vector };
   for (const log of new Set(held.map(({ entry }) => entry.log))) {

@@ -48,9 +48,13 @@ export async function localJob(databases: Databases, job: string): Promise<Local
 }
 
 /** The jobs on this device that name this person, soonest due first. */
-export async function localJobs(databases: Databases, person: string): Promise<LocalJob[]> {
-  const ids = await databases.work.run((database) => database.getAllKeys('jobs'));
-  const jobs = await Promise.all(ids.map((id) => localJob(databases, id)));
+export async function localJobs(
+  { work }: Databases,
+  person: string,
+  read: (job: string) => Promise<LocalJob | undefined>,
+): Promise<LocalJob[]> {
+  const ids = await work.run((database) => database.getAllKeys('jobs'));
+  const jobs = await Promise.all(ids.map(read));
   return jobs
     .filter((job) => job !== undefined)
     .filter((job) => job.pack.people.some(({ id }) => id === person))

@@ -14,20 +14,32 @@ type Received = EntriesPage['entries'][number];
 /** The entry as it was signed, without what the server added; an unknown kind stays as it came. */
 const asSigned = ({ order: _order, receivedAt: _receivedAt, ...entry }: Received): Entry => entry;
 
-async function keepPage(env: DeviceEnvironment, { work }: Databases, job: string, page: EntriesPage) {
-  await work.run(async (database) => {
-    const transaction = database.transaction(['jobs', 'entries', 'logs'], 'readwrite', {
-      durability: 'strict',
-    });
+/** `from` is the cursor the page was asked with: a store wiped meanwhile starts from zero, not from this page. */
+async function keepPage(
+  env: DeviceEnvironment,
+  { work }: Databases,
+  job: string,
+  from: number,
+  page: EntriesPage,
+): Promise<void> {
+  await work.write(['jobs', 'entries', 'logs'], async (transaction) => {
     const row = await transaction.objectStore('jobs').get(job);
-    if (row) {
-      const held = page.entries.map((received) => ({ entry: asSigned(received), setAside: false }));
-      const moved = await keepEntries(transaction, row, held);
-      for (const log of page.logs) await transaction.objectStore('logs').put({ ...log, job });
-      const pulledAt = new Date(env.now()).toISOString();
-      await transaction.objectStore('jobs').put({ ...moved, status: page.status, after: page.after, pulledAt });
-    }
-    await transaction.done;
+    if (row?.after !== from) return;
+    const held = page.entries.map((received) => ({ entry: asSigned(received), setAside: false }));
+    const moved = await keepEntries(transaction, row, held);
+    for (const log of page.logs) await transaction.objectStore('logs').put({ ...log, job });
+    const pulledAt = new Date(env.now()).toISOString();
+    await transaction.objectStore('jobs').put({ ...moved, status: page.status, after: page.after, pulledAt });
+  });
+}
+
+/** What the server now folds is set aside no more. */
+async function forgetAside({ outbox }: Databases, page: EntriesPage): Promise<void> {
+  const aside = new Set(await outbox.run((database) => database.getAllKeys('attention')));
+  const taken = page.entries.filter(({ id }) => aside.has(id));
+  if (taken.length === 0) return;
+  await outbox.write(['attention'], async (transaction) => {
+    for (const { id } of taken) await transaction.objectStore('attention').delete(id);
   });
 }
 
@@ -43,7 +55,8 @@ export async function pullEntries(
     const url = `/api/jobs/${job}/entries?after=${row.after}`;
     const answer = await serverCall(env, entriesPage, url);
     if (answer.kind !== 'ok') return outcomeOf(answer);
-    await keepPage(env, databases, job, answer.value);
+    await keepPage(env, databases, job, row.after, answer.value);
+    await forgetAside(databases, answer.value);
     if (!answer.value.more || answer.value.after <= row.after) return done;
   }
   return done;

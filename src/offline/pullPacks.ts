@@ -18,8 +18,7 @@ async function store(
   packs: PackVerdict[],
   current: { job: string; digest: string; status: string }[],
 ): Promise<void> {
-  await work.run(async (database) => {
-    const transaction = database.transaction(['packs', 'jobs'], 'readwrite', { durability: 'strict' });
+  await work.write(['packs', 'jobs'], async (transaction) => {
     const rows = transaction.objectStore('jobs');
     for (const verdict of packs) if (verdict.ok) await transaction.objectStore('packs').put(verdict.pack);
     for (const { job, digest, status } of current) {
@@ -29,7 +28,6 @@ async function store(
       else if (here) await rows.put({ job, status, pack: digest, after: 0, pulledAt: null, vector: {} });
       else if (row) await rows.put({ ...row, status });
     }
-    await transaction.done;
   });
 }
 
@@ -43,8 +41,7 @@ export async function pullPacks(
   if (answer.kind !== 'ok') return { outcome: outcomeOf(answer), jobs: [] };
   const verdicts = answer.value.packs.map(packIntegrity);
   await store(databases, verdicts, answer.value.current);
-  const bad = verdicts.find((verdict) => !verdict.ok);
-  const outcome: RoundOutcome =
-    bad && !bad.ok ? { end: 'refused', says: { key: errorKeys[bad.why] } } : done;
+  const [bad] = verdicts.filter((verdict) => !verdict.ok);
+  const outcome: RoundOutcome = bad ? { end: 'refused', says: { key: errorKeys[bad.why] } } : done;
   return { outcome, jobs: answer.value.current.map(({ job }) => job) };
 }

@@ -1,6 +1,7 @@
 /** Sends one log's unsent entries of one job until none is left, the server refuses, or nobody answers. */
 import { entriesAnswer, headsProblem } from '../../shared/api/jobs';
 import type { Entry } from '../../shared/job/entry';
+import { render } from '../../shared/wording/render';
 import { acknowledge } from './acknowledge';
 import { batch, maxBatchEntries } from './batch';
 import type { Databases } from './databases';
@@ -27,6 +28,8 @@ type Next = { go: Progress } | { end: RoundOutcome };
 type Acknowledged = { id: string; setAside: boolean }[];
 type Refusal = Extract<ServerAnswer<unknown>, { kind: 'refused' }>;
 
+const asideWords = ({ env }: PushContext): string => render(env.language(), { key: 'device.store.setAside' });
+
 async function attend({ env, databases }: PushContext, entry: Entry, says: string): Promise<void> {
   const row = { entry: entry.id, job: entry.job, says, at: new Date(env.now()).toISOString() };
   await databases.outbox.run((database) => database.put('attention', row));
@@ -46,9 +49,10 @@ async function afterSuccess(
   // An answer that acknowledges nothing we sent would be asked for ever.
   if (!first) return { end: { end: 'refused', says: { key: 'device.store.error.not-acknowledged' } } };
   await acknowledge(context.databases, first.entry.job, held);
-  for (const { entry, setAside } of held) if (setAside) await attend(context, entry, 'set-aside');
+  for (const { entry, setAside } of held) if (setAside) await attend(context, entry, asideWords(context));
   await context.changed();
-  return { go: { ...progress, queue: progress.queue.filter(({ id }) => !answers.has(id)) } };
+  const queue = progress.queue.filter(({ id }) => !answers.has(id));
+  return { go: { ...progress, queue, limit: maxBatchEntries } };
 }
 
 /** First from the head the server names; when that does not join either, the whole log, once. */
@@ -94,11 +98,17 @@ async function step(context: PushContext, unsent: UnsentLog, progress: Progress)
   return { end: outcomeOf(answer) };
 }
 
+const wasRefused = async ({ databases }: PushContext, entry: Entry | undefined): Promise<boolean> =>
+  entry !== undefined &&
+  (await databases.outbox.run((database) => database.getKey('attention', entry.id))) !== undefined;
+
 /** Everything of one log, in batches; bounded, because each step acknowledges, halves or rewinds. */
 export async function pushLog(context: PushContext, unsent: UnsentLog): Promise<RoundOutcome> {
+  const queue = await unsentOfLog(context.databases, unsent.log);
   let progress: Progress = {
-    queue: await unsentOfLog(context.databases, unsent.log),
-    limit: maxBatchEntries,
+    queue,
+    // One that was refused before is asked about alone: the rest of its log cannot go without it.
+    limit: (await wasRefused(context, queue[0])) ? 1 : maxBatchEntries,
     rewinds: 0,
   };
   for (;;) {

@@ -20,7 +20,7 @@ export interface SenderHooks {
   round(scope: RoundScope): Promise<RoundOutcome>;
   watched(): string[];
   /** The state in memory has changed. */
-  told(): Promise<void>;
+  told(): void;
 }
 
 /** The store itself failed: nothing was removed, so the same round can be tried again. */
@@ -66,41 +66,53 @@ export class Sender {
       this.again = true;
       return this.running;
     }
-    this.running = this.runRounds(scope).finally(() => {
+    const running = this.runRounds(scope).finally(() => {
       this.running = null;
       this.schedule();
     });
-    return this.running;
+    this.running = running;
+    return running;
+  }
+
+  /** What is watched has changed: the timer may be due sooner. */
+  reconsider(): void {
+    if (!this.running) this.schedule();
   }
 
   private async runRounds(scope: RoundScope): Promise<void> {
-    let next = scope;
-    do {
-      this.again = false;
-      await this.runOne(next);
-      next = {};
-    } while (this.again && this.state !== 'waiting');
+    this.again = false;
+    await this.runOne(scope).catch((error: unknown) => {
+      this.settle(storeFault(error));
+    });
+    if (this.isWantedAgain()) return this.runRounds({});
+    this.hooks.told();
+  }
+
+  /** Somebody asked while the round ran; where nobody answers, the timer asks again. */
+  private isWantedAgain(): boolean {
+    return this.again && this.failures === 0;
   }
 
   private async runOne(scope: RoundScope): Promise<void> {
     if (this.env.monotonic() < this.notBefore || !(await this.hooks.wanted())) return;
     const ran = await this.env.whileLocked(lockName, async () => {
       this.state = 'sending';
-      await this.hooks.told();
+      this.hooks.told();
       const outcome = await this.hooks.round(scope).catch(storeFault);
       if (!scope.only) this.lastFullAt = this.env.monotonic();
       this.settle(outcome);
     });
     // Another tab is sending: what it does not take is tried shortly after.
     if (!ran) this.failures = Math.max(this.failures, 1);
-    await this.hooks.told();
   }
 
   private settle(outcome: RoundOutcome): void {
     const ends = { done: 'idle', refused: 'waiting', wait: 'waiting', 'sign-in': 'needs-sign-in' } as const;
     this.state = ends[outcome.end];
     this.lastError = 'says' in outcome ? outcome.says : null;
-    this.failures = outcome.end === 'done' ? 0 : this.failures + 1;
+    // What is refused is refused again soon: it must not slow down what goes through.
+    const reached = outcome.end === 'done' || outcome.end === 'refused';
+    this.failures = reached ? 0 : this.failures + 1;
     const wait = outcome.end === 'wait' ? Math.min(outcome.retryAfterMs ?? 0, maxRetryAfterMs) : 0;
     this.notBefore = this.env.monotonic() + wait;
   }
@@ -115,6 +127,7 @@ export class Sender {
   /** The timer runs only between `start` and its end. */
   private schedule(): void {
     this.cancelTimer?.();
+    this.cancelTimer = null;
     if (!this.stopWaking) return;
     this.cancelTimer = this.env.setTimer(Math.max(minWaitMs, this.waitMs()), () => {
       const full = this.env.monotonic() - this.lastFullAt >= visibleMs || this.failures > 0;
@@ -122,4 +135,3 @@ export class Sender {
     });
   }
 }
-

@@ -27,15 +27,17 @@ async function gzipped(json: string): Promise<{ body: BodyInit; encoding: Record
   return { body: await new Response(stream).arrayBuffer(), encoding: { 'content-encoding': 'gzip' } };
 }
 
-async function initOf({ method = 'GET', body }: CallOptions): Promise<RequestInit> {
+async function initOf(language: string, { method = 'GET', body }: CallOptions): Promise<RequestInit> {
   const common = { method, credentials: 'same-origin', cache: 'no-store' } as const;
   const signal = AbortSignal.timeout(timeoutMs);
-  if (body === undefined) return { ...common, signal, headers: { accept: 'application/json' } };
+  // A refusal is kept as the server says it: in the language of the screen.
+  const headers = { accept: 'application/json', 'accept-language': language };
+  if (body === undefined) return { ...common, signal, headers };
   const packed = await gzipped(JSON.stringify(body));
   return {
     ...common,
     signal,
-    headers: { accept: 'application/json', 'content-type': 'application/json', ...packed.encoding },
+    headers: { ...headers, 'content-type': 'application/json', ...packed.encoding },
     body: packed.body,
   };
 }
@@ -54,7 +56,7 @@ export async function serverCall<S extends z.ZodType>(
   url: string,
   options: CallOptions = {},
 ): Promise<ServerAnswer<z.infer<S>>> {
-  const init = await initOf(options);
+  const init = await initOf(env.language(), options);
   const response = await env.fetch(url, init).catch(() => null);
   if (!response) return { kind: 'unreachable', retryAfterMs: null };
   const wait = retryAfterMs(response.headers.get('retry-after'), env.now());

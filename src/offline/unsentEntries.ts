@@ -31,6 +31,8 @@ export async function unsentLogs({ outbox }: Databases): Promise<UnsentLog[]> {
     const counts = await Promise.all(
       heads.map(({ log }) => database.countFromIndex('entries', 'log', logRange(log, 0))),
     );
-    return heads.filter((_, index) => (counts[index] ?? 0) > 0).map(({ job, log, key }) => ({ job, log, key }));
+    return heads
+      .filter((_, index) => (counts[index] ?? 0) > 0)
+      .map(({ job, log, key }) => ({ job, log, key }));
   });
 }

@@ -21,6 +21,5 @@ export async function versionVector(
     );
     if (from <= head.seq && here === head.seq - from + 1) seen[head.log] = head.seq;
   }
-  delete seen[own];
-  return seen;
+  return Object.fromEntries(Object.entries(seen).filter(([log]) => log !== own));
 }

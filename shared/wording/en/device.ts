@@ -1,4 +1,7 @@
+import { store } from './device/store';
+
 export const device = {
+  ...store,
   'device.version.title': 'Version',
   'device.version.is': 'Coldloop {version}',
   'device.version.waits': 'A newer version is on this device. Your answers stay.',

@@ -1,4 +1,7 @@
+import { store } from './device/store';
+
 export const device = {
+  ...store,
   'device.version.title': 'Versión',
   'device.version.is': 'Coldloop {version}',
   'device.version.waits': 'Hay una versión más nueva en este dispositivo. Sus respuestas se conservan.',

@@ -1,0 +1,81 @@
+/** Builds the client into dist/client: hashed chunks, the app's manifest and its service worker. */
+import { existsSync, readdirSync, rmSync, statSync } from 'node:fs';
+import { join } from 'node:path';
+import tailwindcss from '@tailwindcss/vite';
+import react from '@vitejs/plugin-react';
+import { defineConfig, type Plugin } from 'vite';
+import { VitePWA } from 'vite-plugin-pwa';
+import packageFile from './package.json' with { type: 'json' };
+
+const outDir = 'dist/client';
+// sync.md: old hashed files stay on the server for 30 days, for pages that still run them.
+const keptMs = 30 * 24 * 3_600_000;
+
+function dropOldAssets(folder: string, now: number): void {
+  if (!existsSync(folder)) return;
+  for (const name of readdirSync(folder)) {
+    const path = join(folder, name);
+    if (now - statSync(path).mtimeMs > keptMs) rmSync(path);
+  }
+}
+
+/** The files of this build, so that older ones kept beside them are not precached. */
+const built = new Set<string>();
+
+const noteBuilt: Plugin = {
+  name: 'note-built',
+  buildStart: () => dropOldAssets(`${outDir}/assets`, Date.now()),
+  generateBundle(_options, bundle) {
+    for (const file of Object.keys(bundle)) built.add(file);
+    const stamp = { version: packageFile.version, builtAt: new Date().toISOString() };
+    this.emitFile({ type: 'asset', fileName: 'version.json', source: JSON.stringify(stamp) });
+  },
+};
+
+export default defineConfig({
+  plugins: [
+    react(),
+    tailwindcss(),
+    noteBuilt,
+    VitePWA({
+      strategies: 'injectManifest',
+      srcDir: 'src/offline/serviceWorker',
+      filename: 'sw.ts',
+      outDir,
+      registerType: 'prompt',
+      injectRegister: false,
+      injectManifest: {
+        globPatterns: ['**/*.{js,css,html,svg,png,ico,woff2,webmanifest}'],
+        // Only this build is precached, not what earlier ones left.
+        manifestTransforms: [
+          (manifest) => ({
+            manifest: manifest.filter(({ url }) => !url.startsWith('assets/') || built.has(url)),
+            warnings: [],
+          }),
+        ],
+      },
+      manifest: {
+        id: '/',
+        name: 'Coldloop',
+        short_name: 'Coldloop',
+        description: 'Lock-out and wiring checklists for the inputs and outputs of control panels.',
+        start_url: '/my/jobs',
+        scope: '/',
+        display: 'standalone',
+        background_color: '#f7f5f0',
+        theme_color: '#14202b',
+        icons: [
+          { src: '/icon.svg', sizes: 'any', type: 'image/svg+xml' },
+          { src: '/icon-192.png', sizes: '192x192', type: 'image/png' },
+          { src: '/icon-512.png', sizes: '512x512', type: 'image/png' },
+          { src: '/icon-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
+        ],
+      },
+    }),
+  ],
+  // `npm run dev` says where the server listens.
+  server: process.env.COLDLOOP_API
+    ? { proxy: { '/api': process.env.COLDLOOP_API, '/dev': process.env.COLDLOOP_API } }
+    : {},
+  build: { outDir, emptyOutDir: false, manifest: true, target: 'es2022' },
+});
