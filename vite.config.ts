@@ -77,5 +77,6 @@ export default defineConfig({
   server: process.env.COLDLOOP_API
     ? { proxy: { '/api': process.env.COLDLOOP_API, '/dev': process.env.COLDLOOP_API } }
     : {},
-  build: { outDir, emptyOutDir: false, manifest: true, target: 'es2022' },
+  // Nothing inlined: the page's policy takes fonts and pictures from this server only.
+  build: { outDir, emptyOutDir: false, manifest: true, target: 'es2022', assetsInlineLimit: 0 },
 });
