@@ -24,6 +24,8 @@ export interface PanelCheckInput {
   open?: readonly string[] | undefined;
   /** The other panels of the site, where they are known. */
   sitePanels?: readonly Panel[] | undefined;
+  /** For a caller with a clock: false stops the search for the plan past 24 isolators. */
+  mayGoOn?: (() => boolean) | undefined;
   /** Of the site; absent: what a site starts with. */
   settings?: ChecklistInput['settings'] | undefined;
 }
@@ -82,7 +84,7 @@ export const canHurt = (findings: readonly Finding[]): boolean =>
 export function checkPanel(input: PanelCheckInput): PanelCheckResult {
   const { panel, settings = usualSettings } = input;
   const scope = [...new Set(input.scope ?? panel.points.map(({ address }) => address))];
-  const plan = lockPlan(panel, scope);
+  const plan = lockPlan(panel, scope, input.mayGoOn ? { mayGoOn: input.mayGoOn } : {});
   const wiring = checkWiring(panel);
   const isolation = isolationReport(panel, scope, { plan, sitePanels: input.sitePanels });
   const all = [...wiring.findings, ...isolation.findings];

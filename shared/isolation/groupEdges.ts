@@ -2,6 +2,7 @@
 import type { Group, Panel } from '../panel/panelSchema';
 import { edge, node, nowhere } from './graphEdge';
 import type { Edge } from './graphEdge';
+import { sharedTerminals } from './sharedTerminals';
 
 type GroupsByTag = Map<string, Group[]>;
 
@@ -35,9 +36,28 @@ function edgesOfGroup(group: Group, supplies: Set<string>, groups: GroupsByTag):
   ];
 }
 
+/** A terminal of two circuits is a bridge that nobody stated. */
+function meetingEdges(panel: Panel, groups: GroupsByTag): Edge[] {
+  return sharedTerminals(panel).flatMap(({ terminal, groups: tags, supplies }) => [
+    ...tags
+      .slice(1)
+      .flatMap((tag) => (groups.get(tags[0] ?? '') ?? []).flatMap((first) => linkEdges(first, tag, groups))),
+    ...supplies.flatMap((supply) =>
+      tags.map((tag) => edge(node.supply(supply), node.backfeed(tag), { via: [terminal], maybe: true })),
+    ),
+  ]);
+}
+
 export function groupEdges(panel: Panel): Edge[] {
   const supplies = new Set(panel.supplies.map((supply) => supply.tag));
   const groups: GroupsByTag = new Map();
-  for (const group of panel.groups) groups.set(group.tag, [...(groups.get(group.tag) ?? []), group]);
-  return panel.groups.flatMap((group) => edgesOfGroup(group, supplies, groups));
+  for (const group of panel.groups) {
+    const known = groups.get(group.tag);
+    if (known) known.push(group);
+    else groups.set(group.tag, [group]);
+  }
+  return [
+    ...panel.groups.flatMap((group) => edgesOfGroup(group, supplies, groups)),
+    ...meetingEdges(panel, groups),
+  ];
 }

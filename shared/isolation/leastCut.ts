@@ -86,22 +86,21 @@ function thinned(problem: CutProblem, open: ReadonlySet<string>): Set<string> {
 export function leastCut(problem: CutProblem): Cut | null {
   const everything = new Set([...problem.always, ...problem.costs.keys()]);
   if (liveWay(problem, everything, new Set()) !== null) return null;
-  let best = thinned(problem, everything);
-  let bestCost = costOf(problem, best);
-  let proven = true;
+  const first = thinned(problem, everything);
+  const best = { open: first, cost: costOf(problem, first), proven: true };
 
   const search = (open: ReadonlySet<string>, kept: ReadonlySet<string>, cost: bigint): void => {
-    if (!proven || !problem.mayGoOn()) {
-      proven = false;
+    if (!best.proven || !problem.mayGoOn()) {
+      best.proven = false;
       return;
     }
     const way = liveWay(problem, open, kept);
     if (way === null) {
-      if (cost < bestCost) [best, bestCost] = [new Set(open), cost];
+      if (cost < best.cost) [best.open, best.cost] = [new Set(open), cost];
       return;
     }
     const least = bound(problem, open, kept);
-    if (least === null || cost + least >= bestCost) return;
+    if (least === null || cost + least >= best.cost) return;
     const refused = new Set(kept);
     for (const tag of way) {
       search(new Set([...open, tag]), refused, cost + (problem.costs.get(tag) ?? 0n));
@@ -109,5 +108,5 @@ export function leastCut(problem: CutProblem): Cut | null {
     }
   };
   search(problem.always, new Set(), 0n);
-  return { open: proven ? best : thinned(problem, best), proven };
+  return { open: best.proven ? best.open : thinned(problem, best.open), proven: best.proven };
 }

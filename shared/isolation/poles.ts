@@ -42,7 +42,8 @@ export function supplyProbes(supply: Supply, earth: string): Probe[] {
     poles.slice(place + 1).map(([other, second]) => ({ pair: named(pole, other), terminal, second })),
   );
   const toEarth = poles.map(([pole, terminal]) => ({ pair: `${pole}/PE` as Pair, terminal, second: earth }));
-  return [...between, ...toEarth];
+  // A pole bonded at the earth terminal itself makes no pair with it.
+  return [...between, ...toEarth].filter((probe) => probe.terminal !== probe.second);
 }
 
 /** A terminal that stands on a known pole: to the other poles and to earth. On an unknown one: to every pole and to earth. */

@@ -16,22 +16,33 @@ const capacitanceHigh = 1.2;
 const highest = (supply: Supply): number | null =>
   supply.tolerance ? supply.V * (1 + supply.tolerance.maxPct / 100) : null;
 
-/** Volts on the AC side of a rectifier: the AC supplies that feed it, each at its highest. */
-function rectifiedFrom(panel: Panel, supply: Supply): (number | null)[] {
-  if (supply.kind !== 'dc') return [highest(supply)];
-  return supply.feeds.flatMap((feed) => {
+// A capacitor on an AC circuit keeps the peak of the wave.
+const peakOfSine = Math.SQRT2;
+
+/** Volts on the AC side of a rectifier: the peaks of the AC supplies that feed it, each at its highest. */
+function rectifiedPeaks(panel: Panel, supply: Supply): (number | null)[] {
+  const peaks = supply.feeds.flatMap((feed) => {
     const feeders = panel.supplies.filter((one) => one.tag === feed.from && one.kind !== 'dc');
     // Straight from a source: its tolerance is not in the file, so its highest is not known.
     return feeders.length > 0 ? feeders.map(highest) : [null];
   });
+  // The power unit may hold more than the rectified mains: its own output then counts.
+  const own = highest(supply) ?? supply.V;
+  return [
+    ...peaks.map((volts) => (volts === null ? null : volts * peakOfSine)),
+    ...(peaks.length > 0 ? [own] : []),
+  ];
 }
 
+/** Volts on the capacitors when the supply is switched off; null when the file cannot tell. */
 function startVolts(panel: Panel, supply: Supply): number | null {
+  const highestV = highest(supply);
   const rectified = supply.bulk !== 'none' && supply.bulk.rectified === true;
-  const volts = rectified ? rectifiedFrom(panel, supply) : [highest(supply)];
+  if (supply.kind !== 'dc') return highestV === null ? null : highestV * peakOfSine;
+  if (!rectified) return highestV;
+  const volts = rectifiedPeaks(panel, supply);
   const known = volts.filter((one) => one !== null);
-  if (known.length === 0 || known.length < volts.length) return null;
-  return Math.max(...known) * (rectified ? Math.SQRT2 : 1);
+  return known.length === 0 || known.length < volts.length ? null : Math.max(...known);
 }
 
 /** The wait of one supply with stored charge; null for a supply that stores none. */
