@@ -23,7 +23,7 @@ export default defineConfig({
           ...node,
           name: 'browser',
           include: ['tests/browser/**/*.test.ts'],
-          globalSetup: 'tests/support/postgres.ts',
+          globalSetup: ['tests/support/postgres.ts', 'tests/support/build.ts'],
           testTimeout: 300_000,
           hookTimeout: 120_000,
           fileParallelism: false,
