@@ -1,9 +1,10 @@
 /** Every wiring rule, in the order in which their findings are listed. */
 import { dataRules } from './dataRules';
 import { inputRules } from './inputRules';
+import { outputRules } from './outputRules';
 import type { Rule } from './rule';
 import { supplyRules } from './supplyRules';
 
 export const ruleSetVersion = '2026.1';
 
-export const rules: readonly Rule[] = [...supplyRules, ...inputRules, ...dataRules];
+export const rules: readonly Rule[] = [...supplyRules, ...inputRules, ...outputRules, ...dataRules];

@@ -1,6 +1,8 @@
 import { data } from './findings/data';
 import { general } from './findings/general';
 import { inputs } from './findings/inputs';
+import { outputQuantities } from './findings/outputQuantities';
+import { outputs } from './findings/outputs';
 import { quantities } from './findings/quantities';
 import { supplies } from './findings/supplies';
 
@@ -9,5 +11,7 @@ export const findings = {
   ...supplies,
   ...inputs,
   ...data,
+  ...outputs,
+  ...outputQuantities,
   ...quantities,
 } as const;
