@@ -1,9 +1,13 @@
 /** The ordered list of middleware and routes, nothing else. */
 import compression from 'compression';
 import express, { type Express } from 'express';
+import { devicesRoutes } from './features/devices/routes';
+import { entriesRoutes } from './features/entries/routes';
+import { jobsRoutes } from './features/jobs/routes';
 import { devMailRoutes } from './features/mail/devMail';
 import { healthRoutes } from './features/health/routes';
 import { readiness } from './features/health/service';
+import { panelsRoutes } from './features/panels/routes';
 import { peopleRoutes } from './features/people/routes';
 import { sessionRoutes } from './features/sessions/routes';
 import { sitesRoutes } from './features/sites/routes';
@@ -30,10 +34,14 @@ export function createApp(services: Services): Express {
   app.use(staticClient());
   app.use('/api', services.session.handlers);
   app.use('/api', crossSite);
+  app.use('/api', panelsRoutes(services.panels, services.revisions));
+  app.use('/api', jobsRoutes(services.jobs, services.boards));
+  app.use('/api', entriesRoutes(services.entries));
   app.use('/api', express.json({ limit: ordinaryBody, strict: true }));
   app.use('/api', sessionRoutes(limiterOn(services.database), services.session.passport, services.sessions));
   app.use('/api', peopleRoutes(services.people));
   app.use('/api', sitesRoutes(services.sites));
+  app.use('/api', devicesRoutes(services.devices));
   app.use('/api', () => {
     throw notFound();
   });

@@ -3,8 +3,18 @@ import pino, { type Logger } from 'pino';
 import type { DataSource } from 'typeorm';
 import type { Config } from './config';
 import { appDataSource } from './database/dataSource';
+import { DevicesService } from './features/devices/service';
+import { EntriesService } from './features/entries/service';
+import { EntryStore } from './features/entries/store';
+import { JobBoards } from './features/jobs/boards';
+import { JobChoices } from './features/jobs/choices';
+import { Folding } from './features/jobs/folding';
+import { JobsService } from './features/jobs/service';
+import { JobTurns } from './features/jobs/turns';
 import { bossOf, mailQueueOf, type MailQueue } from './features/mail/queue';
 import { startMailWorker } from './features/mail/worker';
+import { RevisionsService } from './features/panels/revisions';
+import { PanelsService } from './features/panels/service';
 import { PeopleService } from './features/people/service';
 import { sessionParts, type SessionParts } from './features/sessions/middleware';
 import { SessionsService } from './features/sessions/service';
@@ -19,6 +29,13 @@ export interface Services {
   sites: SitesService;
   sessions: SessionsService;
   session: SessionParts;
+  devices: DevicesService;
+  panels: PanelsService;
+  revisions: RevisionsService;
+  jobs: JobsService;
+  boards: JobBoards;
+  turns: JobTurns;
+  entries: EntriesService;
   /** Begins work in the background (mails). */
   start: () => Promise<void>;
   close: () => Promise<void>;
@@ -35,6 +52,17 @@ export async function createServices(config: Config): Promise<Services> {
   const sites = new SitesService(database);
   const sessions = new SessionsService(database);
   const session = sessionParts(config, people);
+  const devices = new DevicesService(database, mail, people);
+  const panels = new PanelsService(database, people);
+  const revisions = new RevisionsService(database, people);
+  const store = new EntryStore();
+  const folding = new Folding(store, people);
+  const turns = new JobTurns(mail, people, store, folding);
+  const boards = new JobBoards(database, people, folding, turns);
+  const choices = new JobChoices(database, revisions, sites);
+  const jobs = new JobsService({ database, mail, people, devices, choices, boards, turns });
+  const afterEntries = () => Promise.resolve();
+  const entries = new EntriesService({ database, people, devices, turns, boards, store, afterEntries });
   return {
     config,
     log,
@@ -44,6 +72,13 @@ export async function createServices(config: Config): Promise<Services> {
     sites,
     sessions,
     session,
+    devices,
+    panels,
+    revisions,
+    jobs,
+    boards,
+    turns,
+    entries,
     start: () => startMailWorker(boss, config, log, () => Promise.resolve(null)),
     close: async () => {
       await boss.stop({ graceful: true, wait: true, timeout: 5_000 });

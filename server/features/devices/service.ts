@@ -1,6 +1,6 @@
 /** Devices and the public keys that people sign with on them. */
 import { createPublicKey } from 'node:crypto';
-import { In, type DataSource, type EntityManager } from 'typeorm';
+import { In, IsNull, Not, type DataSource, type EntityManager } from 'typeorm';
 import type { z } from 'zod';
 import type { deviceRequest, DeviceView, keyRequest } from '../../../shared/api/jobs';
 import { sitesOf, type Actor } from '../../http/actor';
@@ -18,14 +18,21 @@ export interface KnownKey {
   person: string;
   device: string;
   publicKey: PublicKey;
+  /** Its device was shut out by an administrator. */
+  revoked: boolean;
 }
 
-const known = ({ id, person, device, publicKey }: DeviceKeyEntity): KnownKey => ({
-  key: id,
-  person,
-  device,
-  publicKey,
-});
+const known = (
+  { id, person, device, publicKey }: DeviceKeyEntity,
+  revoked: ReadonlySet<string>,
+): KnownKey => ({ key: id, person, device, publicKey, revoked: revoked.has(device) });
+
+/** Those of these keys' devices that were shut out. */
+async function revokedOf(tx: EntityManager, keys: readonly DeviceKeyEntity[]): Promise<Set<string>> {
+  const ids = [...new Set(keys.map(({ device }) => device))];
+  const revoked = await tx.findBy(DeviceEntity, { id: In(ids), revokedAt: Not(IsNull()) });
+  return new Set(revoked.map(({ id }) => id));
+}
 
 /** @throws Refused 422 when x and y are no point of the curve. */
 function mustBeOnCurve(publicKey: PublicKey): void {
@@ -109,7 +116,7 @@ export class DevicesService {
       language: actor.language,
       kind: 'key-registered',
       params: { name: actor.name, device: device.name },
-      path: '/device',
+      path: '/my/device',
     });
     const about = { device: device.id, key: id };
     await writeAudit(tx, { actor: actor.person, site: null, act: 'key-registered', about });
@@ -143,17 +150,20 @@ export class DevicesService {
     });
   }
 
-  /** For services that have judged access. */
-  async keysOf(people: readonly string[]): Promise<KnownKey[]> {
-    const keys = await this.database.manager.find(DeviceKeyEntity, {
+  /** Keys of people, oldest first. For services that have judged access. */
+  async keysOf(tx: EntityManager, people: readonly string[]): Promise<KnownKey[]> {
+    const keys = await tx.find(DeviceKeyEntity, {
       where: { person: In([...people]) },
       order: { registeredAt: 'ASC', id: 'ASC' },
     });
-    return keys.map(known);
+    const revoked = await revokedOf(tx, keys);
+    return keys.map((key) => known(key, revoked));
   }
 
   /** Keys by id; unknown ids are left out. For services that have judged access. */
-  async keys(ids: readonly string[]): Promise<KnownKey[]> {
-    return (await this.database.manager.findBy(DeviceKeyEntity, { id: In([...ids]) })).map(known);
+  async keys(tx: EntityManager, ids: readonly string[]): Promise<KnownKey[]> {
+    const keys = await tx.findBy(DeviceKeyEntity, { id: In([...ids]) });
+    const revoked = await revokedOf(tx, keys);
+    return keys.map((key) => known(key, revoked));
   }
 }

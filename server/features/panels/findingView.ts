@@ -1,10 +1,10 @@
 /** Findings as people read them, in their language. */
 import type { Language } from '../../../shared/api/common';
-import type { FindingsAnswer, FindingView } from '../../../shared/api/panels';
-import type { CouldNotRun, Finding, Where } from '../../../shared/rules/finding';
+import type { FindingsAnswer } from '../../../shared/api/panels';
+import type { Finding } from '../../../shared/rules/finding';
 import { isAccepted } from '../../../shared/rules/blocking';
 import { placeKey } from '../../../shared/rules/placeKey';
-import { render } from '../../../shared/wording/render';
+import { findingView } from './panelCheckMapper';
 
 /** An acceptance with who gave it. */
 export interface GivenAcceptance {
@@ -14,28 +14,6 @@ export interface GivenAcceptance {
   by: string;
 }
 type Placed = FindingsAnswer['findings'][number];
-
-const withoutAbsent = (where: Where): Where =>
-  Object.fromEntries(Object.entries(where).filter(([, tag]) => tag !== undefined));
-
-export const findingView = (finding: Finding, language: Language): FindingView => ({
-  rule: finding.rule,
-  harm: finding.harm,
-  where: withoutAbsent(finding.where),
-  says: render(language, finding.says),
-  because: finding.because.map(({ name, value, unit, basis }) => ({
-    name: render(language, { key: name }),
-    value,
-    unit,
-    basis,
-  })),
-  remedy: finding.remedy
-    ? {
-        says: render(language, finding.remedy.says),
-        ...(finding.remedy.values ? { values: finding.remedy.values } : {}),
-      }
-    : null,
-});
 
 /** The acceptance that lifts this finding, if one of these does. */
 export const acceptanceOf = (
@@ -55,9 +33,3 @@ export function placedFinding(
     accepted: acceptance ? { reason: acceptance.reason, by: acceptance.by } : null,
   };
 }
-
-export const couldNotRunView = ({ rule, where, missing }: CouldNotRun) => ({
-  rule,
-  where: withoutAbsent(where),
-  missing,
-});

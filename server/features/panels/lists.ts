@@ -1,7 +1,7 @@
 /** Reads of many panels at once. */
 import type { EntityManager } from 'typeorm';
 import type { Panel } from '../../../shared/panel/panelSchema';
-import { PanelEntity } from './entity';
+import type { PanelEntity } from './entity';
 
 /** The cursor of a panel in a list by tag. */
 export const keysetOf = ({ tag, id }: Pick<PanelEntity, 'tag' | 'id'>): string => `${id}${tag}`;

@@ -13,7 +13,9 @@ export const panelRow = (panel: PanelEntity, openJobs: number): PanelRow => ({
   openJobs,
 });
 
-export const revisionRow = (revision: PanelRevisionEntity, issuedBy: string): RevisionRow => ({
+type IssuedFacts = Pick<PanelRevisionEntity, 'number' | 'digest' | 'issuedAt' | 'ruleSet' | 'standing'>;
+
+export const revisionRow = (revision: IssuedFacts, issuedBy: string): RevisionRow => ({
   number: revision.number,
   digest: revision.digest,
   issuedAt: revision.issuedAt.toISOString(),

@@ -12,7 +12,7 @@ import { writeAudit } from '../audit/service';
 import type { PeopleService } from '../people/service';
 import { changeablePanel, readablePanel } from './access';
 import { PanelEntity, PanelRevisionEntity, type Standing } from './entity';
-import { couldNotRunView, placedFinding } from './findingView';
+import { placedFinding } from './findingView';
 import { othersOfSite } from './lists';
 import { revisionRow } from './mapper';
 import { standingOf } from './standing';
@@ -92,7 +92,7 @@ export class RevisionsService {
     return {
       ruleSet: revision.ruleSet,
       checks,
-      couldNotRun: couldNotRun.map(couldNotRunView),
+      couldNotRun,
       findings: findings.map((finding) => placedFinding(finding, language, revision.standing)),
       problems: [],
     };

@@ -1,12 +1,19 @@
 import express, { Router } from 'express';
 import { z } from 'zod';
-import { draftSave, panelQuery, panelUpload, revisionIssue } from '../../../shared/api/panels';
+import {
+  draftSave,
+  panelCheckRequest,
+  panelQuery,
+  panelUpload,
+  revisionIssue,
+} from '../../../shared/api/panels';
 import { maxPanelBytes, panelSchema } from '../../../shared/panel/panelSchema';
 import { actorOf, authorise } from '../../http/authorise';
 import { limitInFlight } from '../../http/inFlight';
 import { languageOf } from '../../http/language';
 import { parse, parseId } from '../../http/parse';
 import { notFound } from '../../http/refused';
+import { checkFile } from './checkFile';
 import { panelEditors, panelReaders } from './roles';
 import type { RevisionsService } from './revisions';
 import type { PanelsService } from './service';
@@ -62,6 +69,9 @@ export function panelsRoutes(panels: PanelsService, revisions: RevisionsService)
   router.get('/panels/:id/revisions/:number/findings', readers(), async (request, response) => {
     const [id, number] = [parseId(request.params.id), numberOf(request.params.number)];
     response.json(await revisions.findings(actorOf(request), id, number, languageOf(request)));
+  });
+  router.post('/panel-checks', authorise({ who: 'signed-in' }), fewAtOnce, panelBody, (request, response) => {
+    response.json(checkFile(parse(panelCheckRequest, request.body)));
   });
   return router;
 }

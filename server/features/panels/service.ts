@@ -13,7 +13,7 @@ import { writeAudit } from '../audit/service';
 import type { PeopleService } from '../people/service';
 import { changeablePanel, readablePanel } from './access';
 import { PanelEntity, PanelRevisionEntity } from './entity';
-import { couldNotRunView, placedFinding } from './findingView';
+import { placedFinding } from './findingView';
 import { keysetOf, openJobsOf, othersOfSite, panelKeys } from './lists';
 import { panelRow, revisionRow } from './mapper';
 import { panelEditors, panelReaders } from './roles';
@@ -28,8 +28,11 @@ interface ListQuery {
 }
 
 /** PostgreSQL's code for a unique constraint; here only (site, tag) can be broken. */
-const isTagTaken = (error: unknown): boolean =>
-  error instanceof QueryFailedError && 'code' in error.driverError && error.driverError.code === '23505';
+function isTagTaken(error: unknown): boolean {
+  if (!(error instanceof QueryFailedError)) return false;
+  const thrown: unknown = error.driverError;
+  return typeof thrown === 'object' && thrown !== null && 'code' in thrown && thrown.code === '23505';
+}
 
 async function orTagTaken<T>(work: Promise<T>): Promise<T> {
   try {
@@ -100,7 +103,7 @@ export class PanelsService {
         if (!again) {
           if (known.draftVersion !== version) throw await this.stale(tx, known);
           const next = { ...draftOf(panel, digest, actor.person), draftVersion: version + 1 };
-          await tx.save(PanelEntity, { ...known, ...next });
+          await tx.update(PanelEntity, { id }, next);
           const about = { panel: id, digest, version: version + 1 };
           await writeAudit(tx, { actor: actor.person, site: known.site, act: 'draft-saved', about });
         }
@@ -169,7 +172,7 @@ export class PanelsService {
     return {
       ruleSet: ruleSetVersion,
       checks: found.checks,
-      couldNotRun: found.couldNotRun.map(couldNotRunView),
+      couldNotRun: found.couldNotRun,
       findings: found.findings.map((finding) => placedFinding(finding, language, [])),
       problems: panelProblems(draft),
     };

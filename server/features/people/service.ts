@@ -1,7 +1,7 @@
 /** People, their roles on sites, and how they come to have a password. */
 import { In, type DataSource, type EntityManager } from 'typeorm';
 import type { z } from 'zod';
-import type { Page, Role } from '../../../shared/api/common';
+import type { Language, Page, Role } from '../../../shared/api/common';
 import type { invitationRequest, PersonView, personChange } from '../../../shared/api/people';
 import { sitesOf, type Actor } from '../../http/actor';
 import { forbidden, notFound, Refused } from '../../http/refused';
@@ -19,6 +19,14 @@ interface ListQuery {
   role?: Role | undefined;
   after?: string | undefined;
   limit: number;
+}
+
+/** A person as mails need them. */
+export interface Contact {
+  id: string;
+  name: string;
+  email: string;
+  language: Language;
 }
 
 /** Roles that may see who works on a site. */
@@ -181,6 +189,31 @@ export class PeopleService {
   async names(tx: EntityManager, ids: readonly string[]): Promise<Map<string, string>> {
     const people = await tx.findBy(PersonEntity, { id: In([...new Set(ids)]) });
     return new Map(people.map(({ id, name }) => [id, name]));
+  }
+
+  /** Where people who are switched on get their mails, for services that have judged access. */
+  async contacts(tx: EntityManager, ids: readonly string[]): Promise<Contact[]> {
+    const people = await tx.find(PersonEntity, {
+      where: { id: In([...new Set(ids)]), active: true },
+      order: { name: 'ASC', id: 'ASC' },
+    });
+    return people.map(({ id, name, email, language }) => ({ id, name, email, language }));
+  }
+
+  /** Those of these people who are switched on and hold the role on the site. */
+  async holders(tx: EntityManager, ids: readonly string[], site: string, role: Role): Promise<Set<string>> {
+    const people = await tx.find(PersonEntity, {
+      where: { id: In([...ids]), active: true, roles: { site, role } },
+    });
+    return new Set(people.map(({ id }) => id));
+  }
+
+  /** Those of these people who are switched on and hold any role on the site. */
+  async withAccess(tx: EntityManager, ids: readonly string[], site: string): Promise<Set<string>> {
+    const people = await tx.find(PersonEntity, {
+      where: { id: In([...ids]), active: true, roles: { site } },
+    });
+    return new Set(people.map(({ id }) => id));
   }
 
   /** Ends every session of these people; they sign in again with their password. */
