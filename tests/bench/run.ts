@@ -1,0 +1,5 @@
+/** `npm run bench`: times and sizes, as ratios within this run. Nothing is asserted. */
+import { answerSaved } from './answerSaved/run';
+
+await import('./engines');
+console.log(await answerSaved());
