@@ -1,6 +1,7 @@
 /** What is sealed: the canonical JSON of one completed job, as record page, PDF and download show it. */
 import { z } from 'zod';
 import { recordRow } from './records';
+import { signaturePicture } from '../job/entry';
 import { digest, id, instant, language } from './common';
 
 /** One answered step with the words the signer saw. */
@@ -19,6 +20,8 @@ export const recordedAnswer = z.object({
 export const recordDocument = z.object({
   format: z.literal('coldloop-record/1'),
   language,
+  /** The record that this one amends, when entries arrived after its seal. */
+  amends: z.object({ number: z.int(), digest }).nullable(),
   site: z.object({ id, name: z.string() }),
   job: z.object({ id, number: z.string(), due: z.iso.date(), words: z.string().nullable() }),
   panel: z.object({
@@ -29,6 +32,10 @@ export const recordDocument = z.object({
     revision: z.int(),
     digest,
   }),
+  /** Digest of the checklist pack that was answered. */
+  pack: digest,
+  /** Every log with its last entry: who wrote how many, and the hash that covers them all. */
+  logs: z.array(z.object({ log: id, person: z.string(), seq: z.int(), hash: digest })),
   scope: z.array(z.string()),
   people: z.array(z.object({ id, name: z.string(), part: z.enum(['electrician', 'foreman']) })),
   times: z.object({
@@ -105,6 +112,9 @@ export const recordDocument = z.object({
       points: z.array(z.string()),
     }),
   ),
+  photos: z.array(
+    z.object({ sha256: digest, shown: z.string().nullable(), person: z.string(), at: instant }),
+  ),
   signatures: z.array(
     z.object({
       kind: z.enum(['signed', 'countersigned']),
@@ -113,6 +123,7 @@ export const recordDocument = z.object({
       at: instant,
       zone: z.string(),
       digest,
+      picture: signaturePicture,
     }),
   ),
 });

@@ -1,0 +1,66 @@
+/** What did not go as planned: first in the record, so that nobody has to look for it. */
+import type { Printing } from './printed';
+
+type Line = readonly [what: string, words: string];
+
+const outLines = ({ document, words: { t, at } }: Printing): Line[] =>
+  [...document.points.flatMap(({ answers }) => answers), ...document.steps]
+    .filter(({ verdict }) => verdict !== 'ok')
+    .map(({ verdict, shown, answer, person, at: when }) => [
+      t(`records.verdict.${verdict}`),
+      `${shown}: ${answer}. ${person}, ${at(when)}`,
+    ]);
+
+const deadLines = ({ document, words: { t, at } }: Printing): Line[] =>
+  document.deadTests
+    .filter(({ verdict }) => verdict !== 'ok')
+    .map(({ verdict, terminal, second, value, unit, person, at: when }) => [
+      t(`records.verdict.${verdict}`),
+      `${t('records.deadTests')}, ${terminal} – ${second}: ${value} ${unit}. ${person}, ${at(when)}`,
+    ]);
+
+const lockLines = ({ document, words: { t } }: Printing): Line[] =>
+  document.lockOut
+    .filter(({ removedBy }) => removedBy !== null)
+    .map(({ isolator, lock, person, removedBy }) => [
+      `${t('records.lock')} ${lock}`,
+      `${isolator}, ${person}: ${t('records.removedBy', { name: removedBy ?? '' })}`,
+    ]);
+
+const roundLines = ({ document, words: { t, at } }: Printing): Line[] =>
+  document.rounds
+    .filter(({ number }) => number > 1)
+    .map(({ number, words, points, person, at: when }) => [
+      t('records.roundN', { n: number }),
+      `${words} (${points.join(', ')}). ${person}, ${at(when)}`,
+    ]);
+
+function holdLines({ document, words: { t, at } }: Printing): Line[] {
+  return document.holds.map((hold) => {
+    const decided =
+      hold.decidedBy === null
+        ? t('records.hold.undecided')
+        : t('records.hold.decided', {
+            name: hold.decidedBy,
+            decision: hold.decision === null ? '' : t(`records.decision.${hold.decision}`),
+            words: hold.decidedWords ?? '',
+          });
+    return [t('records.hold'), `${hold.shown}: ${hold.words}. ${hold.person}, ${at(hold.at)}. ${decided}`];
+  });
+}
+
+const findingLines = ({ document, words: { t } }: Printing): Line[] =>
+  document.findings.map(({ rule, place, says, accepted }) => [
+    `${rule} ${place}`,
+    accepted ? `${says} ${t('office.acceptedBy', { name: accepted.by, reason: accepted.reason })}` : says,
+  ]);
+
+export function exceptionsSection(printing: Printing): void {
+  const { sheet, words } = printing;
+  sheet.heading(words.t('records.exceptions'), 2);
+  const lines = [outLines, deadLines, lockLines, roundLines, holdLines, findingLines].flatMap((of) =>
+    of(printing),
+  );
+  if (lines.length === 0) sheet.paragraph(words.t('records.exceptions.none'));
+  for (const [what, says] of lines) sheet.paragraph(`${what}  ${says}`);
+}
