@@ -91,7 +91,10 @@ export class LocalDeviceStore implements DeviceStore {
   watch(job: string): () => void {
     const letGo = this.watched.watch(job);
     this.sender.reconsider();
-    return letGo;
+    return () => {
+      letGo();
+      this.sender.reconsider();
+    };
   }
 
   start(): () => void {

@@ -7,6 +7,7 @@ import { batch, maxBatchEntries } from './batch';
 import type { Databases } from './databases';
 import type { DeviceEnvironment } from './environment';
 import { done, outcomeOf, type RoundOutcome } from './roundOutcome';
+import { rememberSent } from './sendStatus';
 import { serverCall, type ServerAnswer } from './serverCall';
 import { unsentOfLog, wholeLog, type UnsentLog } from './unsentEntries';
 
@@ -50,6 +51,7 @@ async function afterSuccess(
   if (!first) return { end: { end: 'refused', says: { key: 'device.store.error.not-acknowledged' } } };
   await acknowledge(context.databases, first.entry.job, held);
   for (const { entry, setAside } of held) if (setAside) await attend(context, entry, asideWords(context));
+  await rememberSent(context.databases, new Date(context.env.now()).toISOString());
   await context.changed();
   const queue = progress.queue.filter(({ id }) => !answers.has(id));
   return { go: { ...progress, queue, limit: maxBatchEntries } };

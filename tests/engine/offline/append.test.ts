@@ -93,7 +93,7 @@ describe('append', () => {
     expect(reopened.sendState().unsent).toBe(2);
   });
 
-  const faults: [string, Fault[], string | 'kept'][] = [
+  const faults: [string, Fault[], string][] = [
     ['a full disk is said and nothing is kept', ['quota'], 'quota'],
     ['a lost connection is opened again, once', ['lost'], 'kept'],
     ['a connection lost twice is said', ['lost', 'lost'], 'closed'],

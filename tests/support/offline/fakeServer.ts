@@ -38,7 +38,7 @@ export class FakeServer {
 
   fetch: typeof fetch = async (input, init) => {
     const method = init?.method ?? 'GET';
-    const url = new URL(String(input), 'https://fake.test');
+    const url = new URL(input instanceof Request ? input.url : input, 'https://fake.test');
     this.requests.push({ method, path: url.pathname });
     await Promise.resolve();
     const meddled = this.meddle(method, url.pathname);
