@@ -67,6 +67,9 @@ function atTerminals(draw: Draw, V: number, sourceOhm: number): Pick<Solved, 'V'
   return { V: terminalV, mA, ledmA: Math.max(0, mA - past) };
 }
 
+/** What an input draws at these volts on its terminals, mA. */
+export const drawnmA = (draw: Draw, V: number): number => atTerminals(draw, V, 0).mA;
+
 /** Solves the loop with its devices closed. Volts and milliamperes; AC as r.m.s. with drops added as they are. */
 export function solveInputLoop({ V, dropV, cableOhm, bleederOhm = Infinity, draw }: Loop): Solved {
   const openV = Math.max(0, V - dropV);

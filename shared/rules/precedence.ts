@@ -2,6 +2,10 @@
 import type { Finding } from './finding';
 import type { RuleContext } from './context';
 
+/** Of `input.undefined` only its sentence about the device that is off: that it is not on has another cause. */
+const whileOff = ['input.never-off', 'finding.input.undefined.open'] as const;
+
+/** By rule: the rules it hides, or one sentence of a rule. */
 const hides: Record<string, readonly string[]> = {
   'output.triac-on-dc': ['supply.kind'],
   'output.transistor-on-ac': ['supply.kind'],
@@ -11,8 +15,8 @@ const hides: Record<string, readonly string[]> = {
   'input.namur': ['input.never-on'],
   'input.dc-sensor-on-ac': ['input.never-on'],
   'input.ac-sensor-on-dc': ['input.never-on'],
-  'input.leakage': ['input.never-off', 'input.undefined'],
-  'input.cable-capacitance': ['input.never-off', 'input.undefined'],
+  'input.leakage': whileOff,
+  'input.cable-capacitance': whileOff,
   'output.ssr-control': ['output.load-underfed'],
 };
 
@@ -31,8 +35,9 @@ export function withoutExplained(findings: Finding[], context: RuleContext): Fin
         if (place.group) hidden.add(`${rule} group ${place.group.group.tag}`);
     }
   }
+  const isHidden = (name: string, { where }: Finding) =>
+    hidden.has(`${name} point ${where.point}`) || hidden.has(`${name} group ${where.group}`);
   return findings.filter(
-    ({ rule, where }) =>
-      !hidden.has(`${rule} point ${where.point}`) && !hidden.has(`${rule} group ${where.group}`),
+    (finding) => !isHidden(finding.rule, finding) && !isHidden(finding.says.key, finding),
   );
 }
