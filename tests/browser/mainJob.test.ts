@@ -12,11 +12,11 @@ import { en } from '../../shared/wording/en';
 import { render } from '../../shared/wording/render';
 import { paths } from '../../src/app/paths';
 import { seedPerson, seedSite } from '../support/seedPeople';
+import { enrolOnPage } from '../support/browser/enrolOnPage';
 import { deskContext, launch, phoneContext } from '../support/browser/chromium';
 import { liveServer, type LiveServer } from '../support/browser/liveServer';
 import { issueRevision, sendJob, uploadPanel } from '../support/browser/office';
 import {
-  answerWell,
   carryOn,
   drawSignature,
   enterPin,
@@ -41,13 +41,7 @@ const saveButton = (page: Page) => page.locator('footer button[aria-busy]');
 /** Signs in, sets a PIN on this phone, and waits for the job to come. */
 async function setUpPhone(page: Page, name: string): Promise<void> {
   await signInOnPage(page, emailOf(name));
-  await page.goto(paths.device);
-  await page.getByLabel(en['device.enrol.pin']).fill(pin);
-  await page.getByLabel(en['device.enrol.again']).fill(pin);
-  await page.getByRole('button', { name: en['device.enrol.save'] }).click();
-  await page.waitForURL((url) => url.pathname === paths.myJobs);
-  await page.getByRole('button', { name: en['field.jobs.look'] }).click();
-  await page.getByRole('link', { name: /Open job/ }).waitFor();
+  await enrolOnPage(page);
 }
 
 /** Presses whatever button stands beside a missing condition until the verdict is that it works. */

@@ -1,0 +1,22 @@
+/** What axe finds on the page as it stands, in words a failing test can show. */
+import { readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import type { AxeResults } from 'axe-core';
+import type { Page } from 'playwright-core';
+
+const source = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
+
+export async function axeFindings(page: Page): Promise<string[]> {
+  // The page's policy refuses script tags: the debugger's own evaluation is not one.
+  await page.evaluate(source);
+  const { violations } = await page.evaluate<AxeResults>('axe.run()');
+  return violations.flatMap(({ id, help, nodes }) =>
+    nodes.map(
+      ({ target, failureSummary }) => `${id}: ${help} at ${target.join(' ')} (${failureSummary ?? ''})`,
+    ),
+  );
+}
+
+/** Text wider than the window hides behind its edge on a phone. */
+export const sticksOut = (page: Page): Promise<boolean> =>
+  page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth + 1);
