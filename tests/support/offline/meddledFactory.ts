@@ -19,7 +19,7 @@ const abortAsFull = (transaction: IDBTransaction) => {
 function meddledTransaction(database: IDBDatabase, meddle: Meddle): IDBDatabase['transaction'] {
   const real = database.transaction.bind(database);
   return (stores, mode = 'readonly', options) => {
-    const fault = meddle([stores].flat(), mode);
+    const fault = meddle(typeof stores === 'string' ? [stores] : [...stores], mode);
     if (fault === 'lost') {
       database.close();
       throw new DOMException('the connection is gone', 'InvalidStateError');
