@@ -1,5 +1,6 @@
 import 'fake-indexeddb/auto';
 import { IDBFactory } from 'fake-indexeddb';
+import type { DBSchema } from 'idb';
 import { describe, expect, test } from 'vitest';
 import { Connection, DatabaseBlockedError } from '../../../src/offline/connection';
 import { notSaved } from '../../../src/offline/notSaved';
@@ -7,7 +8,7 @@ import { outboxSpec } from '../../../src/offline/outboxDatabase';
 import { NotSavedError } from '../../../src/offline/types';
 import { workSpec } from '../../../src/offline/workDatabase';
 
-interface Plain {
+interface Plain extends DBSchema {
   things: { key: string; value: string };
 }
 const spec = (version: number) => ({
