@@ -16,6 +16,8 @@ export interface JobFacts {
   /** log id → person id; the log of an unknown owner folds as nobody's. */
   logs: Record<string, string>;
   cancelled?: boolean;
+  /** Digest of the pack in force. Dead readings answered under another prove nothing now. */
+  pack?: string;
 }
 
 /** A refusal of a gate, in words: why this person cannot answer this step now. */
@@ -83,6 +85,8 @@ export interface Proof {
   missingTests: string[];
   holds: boolean;
   lastTestAt?: string;
+  /** Terminals of points (step ids) that they read dead themselves in this proof. */
+  terminals: string[];
 }
 
 export interface SignatureState {
@@ -100,6 +104,10 @@ export type JobStatus =
 
 export interface JobState {
   status: JobStatus;
+  /** Everybody on the job, as the facts named them. */
+  people: JobPerson[];
+  /** An electrician has accepted it: nothing opens before. */
+  accepted: boolean;
   round: { id: string; number: number; points: string[] };
   rounds: {
     id: string;
@@ -117,8 +125,21 @@ export interface JobState {
   proofs: Record<string, Proof>;
   signatures: SignatureState[];
   countersign?: SignatureState;
+  /** Which of two answers a foreman chose, and why. */
+  chosen: { entry: string; person: string; at: string; body: BodyOf<'chosen'> }[];
   returns: { entry: string; person: string; at: string; steps: { step: string; words: string }[] }[];
+  /** Entries that cannot both be true: wiring and closing are shut, sealing waits. */
   contradictions: { code: string; entries: string[]; says: Text }[];
+  /** Contradictions that ended when a lock came off: kept for the record. */
+  settled: { code: string; entries: string[]; says: Text }[];
+  /** Locks off has begun, or something was closed, in this round. */
+  isolationOver: boolean;
+  /** Electricians who are clear in this round, after everything they did in the panel. */
+  clear: string[];
+  /** Dead steps with a reading over its limit that nobody has measured again in limits. */
+  dangers: string[];
+  /** Everybody who took part in the work: none of them countersigns it. */
+  tookPart: string[];
   /** Parents named by an entry and held nowhere: `log` heard to `seq`. */
   gaps: { log: string; seq: number }[];
   forks: { log: string; entries: string[] }[];

@@ -1,1 +1,69 @@
-export const job = {} as const;
+/** Why a step, a signature or a seal is refused, and what cannot both be true. */
+export const job = {
+  'job.gate.not-on-job': 'You are not on this job as an electrician.',
+  'job.gate.not-accepted': 'Accept the job first.',
+  'job.gate.cancelled': 'This job was cancelled.',
+  'job.gate.unknown-step': 'This step is not in the checklist of this job.',
+  'job.gate.held': 'Somebody could not do this step. It waits for the foreman.',
+  'job.gate.stopped': 'Work is stopped. Somebody could not do this step: {step}',
+  'job.gate.contradiction': 'Two reports cannot both be true. {what}',
+  'job.gate.unreadable': 'This app cannot read everything that was sent. Update the app first.',
+  'job.gate.isolation-over': 'Locks are coming off or power is back. Start a new round first.',
+  'job.gate.danger': 'A reading was not dead. Read it again first: {step}',
+  'job.gate.order': 'First do this step: {step}',
+  'job.gate.own-locks': 'Your own lock must be on {isolators}.',
+  'job.gate.own-tests':
+    'Prove dead yourself first. {n, plural, =0 {} one {One reading is missing.} other {# readings are missing.}}',
+  'job.gate.own-terminal': 'Read the terminals of {point} dead yourself first.',
+  'job.gate.point-held': 'Point {point} waits for the foreman.',
+  'job.gate.temporaries':
+    '{n, plural, one {One temporary change is} other {# temporary changes are}} still in the panel. Put that right first.',
+  'job.gate.no-own-lock': 'You have no lock on {isolator}.',
+  'job.gate.locked': 'Lock {lock} of {name} is still on {isolator}.',
+  'job.gate.not-clear': 'These people have not said that they are clear: {names}.',
+  'job.gate.wrong-kind': 'This is not an answer to this step.',
+  'job.gate.lock-elsewhere': 'Lock {lock} is already on {other}. It cannot be on {isolator} too.',
+  'job.gate.not-that-lock': 'You have no lock {lock} on {isolator}.',
+  'job.gate.not-watched': 'The reading that was watched is not in this round, or is another one.',
+  'job.sign.not-on-job': 'You are not on this job as an electrician.',
+  'job.sign.cancelled': 'This job was cancelled.',
+  'job.sign.already-countersigned': 'This job is countersigned.',
+  'job.sign.unsettled': 'This step is still open: {step}',
+  'job.sign.contradiction': 'Two reports cannot both be true. {what}',
+  'job.sign.unreadable': 'This app cannot read everything that was sent. Update the app first.',
+  'job.sign.lock-on': 'Lock {lock} of {name} is still on {isolator}.',
+  'job.sign.not-read': 'Do this first: {step}',
+  'job.sign.nothing': 'You have nothing left to sign.',
+  'job.sign.not-foreman': 'You are not the foreman of this job.',
+  'job.sign.took-part': 'You took part in this work. Another foreman must countersign it.',
+  'job.sign.not-signed': 'Not every answer is signed by the person who gave it.',
+  'job.sign.changed': 'Void: this step was changed after the signature: {step}',
+  'job.sign.earlier-state': 'Countersigned an earlier state. Something came after it. Sign again.',
+  'job.contradiction.closed-under-lock':
+    '{isolator} was closed while lock {lock} of {name} may have been on it.',
+  'job.contradiction.lock-twice': 'Lock {lock} is said to be on {isolator} and on {other}.',
+  'job.contradiction.two-contents': 'One report came in two versions.',
+  'job.seal.not-countersigned': 'The job is not countersigned, or something came after it.',
+  'job.seal.unsettled': 'This step is still open: {step}',
+  'job.seal.not-signed': 'Not every answer is signed by the person who gave it.',
+  'job.seal.same-person': '{name} worked on this job and countersigned it.',
+  'job.seal.lock-on': 'Lock {lock} of {name} is still on {isolator}.',
+  'job.seal.contradiction': 'Two reports cannot both be true. {what}',
+  'job.seal.gap': '{n, plural, one {One phone has} other {# phones have}} reports that never arrived.',
+  'job.seal.unreadable': 'There are reports of a kind that this version cannot read.',
+  'job.seal.set-aside': '{n, plural, one {One report is} other {# reports are}} set aside and not decided.',
+  'job.seal.bad-signature':
+    '{n, plural, one {One report has} other {# reports have}} a signature that does not fit its key.',
+  'job.seal.key':
+    '{n, plural, one {One report was} other {# reports were}} signed with a key that did not count then.',
+  'job.seal.pack':
+    '{n, plural, one {One report answers} other {# reports answer}} a checklist that was never issued.',
+  'job.seal.digest':
+    '{n, plural, one {One signature covers} other {# signatures cover}} something else than what was shown.',
+  'job.seal.photo':
+    '{n, plural, one {One photo has} other {# photos have}} not arrived and {n, plural, one {is} other {are}} not written off.',
+  'job.seal.log-open': 'Not everything may have arrived from {names}.',
+  'job.seal.other-phone':
+    'The countersignature was made on another person’s phone. The foreman must confirm it.',
+  'job.seal.refused-lock': 'Isolator {isolator} is not known to be closed.',
+} as const;
