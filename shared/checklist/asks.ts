@@ -4,13 +4,15 @@ import type { Ask, ReadingAsk } from './types';
 
 export const done = (key = 'checklist.answer.done'): Ask => ({ kind: 'done', label: say(key) });
 
-const plainChoices = new Map<string, Ask>();
+const knownChoices = new Map<string, Ask>();
+// The values come from panel files: without an end a server would keep those of every panel it ever saw.
+const mostKnownChoices = 500;
 
 /** A choice of good answers and bad ones, by their names under `checklist.choice`. */
 export function choice(good: readonly string[], bad: readonly string[], params?: Text['params']): Ask {
-  // The same few choices stand in thousands of steps: those without values are made once.
-  const name = `${good.join()}/${bad.join()}`;
-  const known = params ? undefined : plainChoices.get(name);
+  // The same few choices stand in thousands of steps: they are made once and shared.
+  const name = `${good.join()}/${bad.join()}${params ? JSON.stringify(params) : ''}`;
+  const known = knownChoices.get(name);
   if (known) return known;
   const option = (ok: boolean) => (value: string) => ({
     value,
@@ -18,7 +20,8 @@ export function choice(good: readonly string[], bad: readonly string[], params?:
     ok,
   });
   const made: Ask = { kind: 'choice', options: [...good.map(option(true)), ...bad.map(option(false))] };
-  if (!params) plainChoices.set(name, made);
+  if (knownChoices.size >= mostKnownChoices) knownChoices.clear();
+  knownChoices.set(name, made);
   return made;
 }
 

@@ -119,8 +119,12 @@ export function factsOf(input: ChecklistInput): Facts {
   );
   const seeds = stays.flatMap((finding) => (finding.addsSteps ?? []).map((seed) => ({ ...seed, finding })));
   const tests = new Map<string, DeadTest[]>();
-  for (const test of input.deadTests)
-    if ('point' in test.at) tests.set(test.at.point, [...(tests.get(test.at.point) ?? []), test]);
+  for (const test of input.deadTests) {
+    if (!('point' in test.at)) continue;
+    const gathered = tests.get(test.at.point);
+    if (gathered) gathered.push(test);
+    else tests.set(test.at.point, [test]);
+  }
   const byFamily = new Map<string, typeof seeds>();
   for (const seed of seeds) byFamily.set(seed.family, [...(byFamily.get(seed.family) ?? []), seed]);
   return {

@@ -3,6 +3,7 @@ const pieces = /(\d+)/;
 
 /** Negative when `a` is read before `b`. Digits compare as numbers, the rest by UTF-16 code units. */
 export function naturalCompare(a: string, b: string): number {
+  if (a === b) return 0;
   const left = a.split(pieces);
   const right = b.split(pieces);
   for (let i = 0; i < Math.min(left.length, right.length); i += 1) {

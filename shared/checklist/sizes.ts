@@ -74,7 +74,7 @@ export function ferruleText(cable: Cable | undefined, scheme: FerruleScheme): Te
 }
 
 /** The maker's torque, else the test torques of IEC 60999-1, marked as such: the panel file does not know the thread. */
-export const torqueText = ({ terminalRange }: Module): Text =>
+export const torqueText = (terminalRange: Module['terminalRange']): Text =>
   terminalRange?.torqueNm === undefined
     ? say('checklist.wire.torque.test')
     : say('checklist.wire.torque', { Nm: terminalRange.torqueNm });

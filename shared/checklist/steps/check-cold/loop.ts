@@ -8,8 +8,13 @@ import { makeStep } from '../../makeStep';
 import type { ReadingAsk, Step } from '../../types';
 import { isElectronic } from './electronic';
 
-const common = ({ address, terminal }: Point) =>
-  ({ stage: 'check-cold', family: 'loop', where: { point: address, terminal } }) as const;
+type Own = Pick<Step, 'id' | 'title' | 'ask' | 'detail' | 'picture'>;
+
+const cold = ({ where }: PointFacts, { id, title, ask, detail, picture }: Own): Step =>
+  makeStep({ id, stage: 'check-cold', family: 'loop', title, ask, detail, where, picture });
+
+// Shared by every point: a checklist holds thousands of these.
+const beforeContinuity = [say('checklist.cold.loop.zero'), say('checklist.cold.loop.short')];
 
 /** Limits only where the cable gives them: no cable, no invented number. */
 function continuityAsk(point: Point): ReadingAsk {
@@ -28,20 +33,19 @@ function continuityAsk(point: Point): ReadingAsk {
   };
 }
 
-function continuity(point: Point): Step[] {
+function continuity(worked: PointFacts): Step[] {
+  const { point } = worked;
   const devices = [point.device, ...(point.series ?? []), ...(point.parallel ?? [])];
   if (devices.some(isElectronic)) return [];
   return [
-    makeStep({
-      ...common(point),
+    cold(worked, {
       id: `cold.${point.address}.loop`,
       title: say('checklist.cold.loop', { terminal: point.terminal }),
-      detail: [say('checklist.cold.loop.zero'), say('checklist.cold.loop.short')],
+      detail: beforeContinuity,
       ask: continuityAsk(point),
-      picture: { kind: 'loop', point: point.address },
+      picture: worked.loop,
     }),
-    makeStep({
-      ...common(point),
+    cold(worked, {
       id: `cold.${point.address}.loop.open`,
       title: say('checklist.cold.loop.open', { terminal: point.terminal }),
       ask: choice(['short-off'], ['short-on']),
@@ -54,27 +58,24 @@ export function loop(facts: Facts, worked: PointFacts): Step[] {
   const { address, terminal } = point;
   const neighbours = facts.beside(worked.module.tag, terminal);
   const beside = (neighbour: string) =>
-    makeStep({
-      ...common(point),
+    cold(worked, {
       id: `cold.${address}.neighbour.${neighbour}`,
       title: say('checklist.cold.neighbour', { terminal, neighbour }),
       ask: choice(['no-connection'], ['connection']),
     });
   return [
-    ...continuity(point),
-    makeStep({
-      ...common(point),
+    ...continuity(worked),
+    cold(worked, {
       id: `cold.${address}.earth`,
       title: say('checklist.cold.earth', { terminal, earth: facts.panel.earthTerminal }),
       ask: choice(['no-connection'], ['connection']),
     }),
     ...neighbours.map(beside),
-    makeStep({
-      ...common(point),
+    cold(worked, {
       id: `cold.${address}.polarity`,
       title: say('checklist.cold.polarity', { terminal }),
       ask: choice(['ends-match'], ['ends-differ']),
-      picture: { kind: 'loop', point: address },
+      picture: worked.loop,
     }),
   ];
 }

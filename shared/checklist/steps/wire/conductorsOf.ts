@@ -10,7 +10,18 @@ export interface Conductor {
   name: string;
 }
 
-export function conductorsOf({ conductors = [], terminal, wire }: Point): Conductor[] {
+const known = new WeakMap<Point, Conductor[]>();
+
+/** Asked for by several families of each point, so it is worked out once. */
+export function conductorsOf(point: Point): readonly Conductor[] {
+  const before = known.get(point);
+  if (before) return before;
+  const found = named(point);
+  known.set(point, found);
+  return found;
+}
+
+function named({ conductors = [], terminal, wire }: Point): Conductor[] {
   const own = conductors.some((each) => each.terminal === terminal)
     ? []
     : [{ role: 'signal' as const, wire, terminal }];

@@ -7,17 +7,20 @@ import type { Step } from '../../types';
 
 export function finish({ point, where }: PointFacts): Step[] {
   const { address, terminal, wire } = point;
-  const common = { stage: 'wire', family: 'finish', where } as const;
   return [
     makeStep({
-      ...common,
       id: `wire.${address}.tug`,
+      stage: 'wire',
+      family: 'finish',
+      where,
       title: say('checklist.wire.tug', { terminal }),
       ask: choice(['wires-hold'], ['wire-moved']),
     }),
     makeStep({
-      ...common,
       id: `wire.${address}.label`,
+      stage: 'wire',
+      family: 'finish',
+      where,
       title: say('checklist.wire.label', { wire, terminal }),
       ask: choice(['label-reads-right'], ['label-wrong']),
     }),

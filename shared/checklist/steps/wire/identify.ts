@@ -8,10 +8,11 @@ import type { Step } from '../../types';
 
 export function identify({ point, where }: PointFacts): Step[] {
   const { address, terminal, wire, cable, description, device } = point;
-  const common = { stage: 'wire', family: 'identify', where } as const;
   const seen = makeStep({
-    ...common,
     id: `wire.${address}.identify`,
+    stage: 'wire',
+    family: 'identify',
+    where,
     title: say(cable?.tag ? 'checklist.wire.identify.cable' : 'checklist.wire.identify', {
       wire,
       cable: cable?.tag ?? '',
@@ -28,8 +29,10 @@ export function identify({ point, where }: PointFacts): Step[] {
   return [
     seen,
     makeStep({
-      ...common,
       id: `wire.${address}.size`,
+      stage: 'wire',
+      family: 'identify',
+      where,
       title: say('checklist.wire.size', { wire, terminal }),
       ask: choice(['size-expected'], ['size-other'], { size }),
     }),

@@ -8,11 +8,11 @@ import type { Step } from '../../types';
 // A diode conducts one way only, reversed it is a short; a zener or TVS may be one-way too.
 const oneWay: ReadonlySet<string> = new Set(['diode', 'zener', 'tvs']);
 
-export function suppression({ point, supply }: PointFacts): Step[] {
+export function suppression({ point, supply, where }: PointFacts): Step[] {
   const { address, terminal, suppressor } = point;
   if (!suppressor || suppressor.kind === 'none') return [];
   const what = say(`checklist.suppressor.${suppressor.kind}`);
-  const common = { stage: 'wire', family: 'suppression', where: { point: address, terminal } } as const;
+  const common = { stage: 'wire', family: 'suppression', where } as const;
   const fitted = makeStep({
     ...common,
     id: `wire.${address}.suppressor`,

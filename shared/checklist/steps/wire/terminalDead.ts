@@ -1,5 +1,6 @@
 /** The first steps of a point: its terminals read dead, one by one, by the person who is about to touch them. */
 import { foreignSupplies } from '../../../isolation/foreignSupplies';
+import type { Supply } from '../../../panel/panelSchema';
 import { say } from '../../../panel/says';
 import { deadReading } from '../../asks';
 import type { Facts, PointFacts } from '../../facts';
@@ -9,7 +10,6 @@ import type { Step } from '../../types';
 import { conductorsOf, type Conductor } from './conductorsOf';
 import { otherPoles, polesOf } from './poles';
 
-const functions = ['AC', 'DC'] as const;
 const atEarth: ReadonlySet<string> = new Set(['earth', 'screen']);
 
 interface Against {
@@ -19,35 +19,40 @@ interface Against {
   proves: boolean;
 }
 
-/** What the isolation engine asks of this terminal; the group's other pole where it asks nothing of that supply. */
-function polesAgainst(facts: Facts, { point, group, supply }: PointFacts, terminal: string): Against[] {
+type Pole = Omit<Against, 'name'>;
+
+const everyPole = (supply: Supply): Pole[] =>
+  polesOf(supply).map((second) => ({ second, supply: supply.tag, proves: true }));
+
+/** The group's other pole, where the isolation engine asks nothing of that supply at this terminal. */
+function ownPoles({ group, supply }: PointFacts, tested: readonly Pole[]): Pole[] {
+  if (!supply) return [];
+  const poles = polesOf(supply);
+  if (tested.some(({ second }) => poles.includes(second))) return [];
+  return otherPoles(group, supply).map((second) => ({ second, supply: supply.tag, proves: true }));
+}
+
+/** What the isolation engine asks of this terminal, then the group's other pole, then every foreign pole; each once. */
+function polesAgainst(facts: Facts, worked: PointFacts, terminal: string): Against[] {
+  const { point } = worked;
   const earth = facts.panel.earthTerminal;
-  const tested = facts
+  const tested: Pole[] = facts
     .testsAt(point.address)
     .filter((test) => test.terminal === terminal && test.second !== earth)
     .sort((a, b) => naturalCompare(a.second, b.second));
-  const own = supply
-    ? otherPoles(group, supply).map((second) => ({ second, supply: supply.tag, proves: true }))
-    : [];
-  const foreign = foreignSupplies(point)
-    .map((tag) => facts.supply(tag ?? undefined))
-    .filter((each) => each !== undefined)
-    .flatMap((each) => polesOf(each).map((second) => ({ second, supply: each.tag, proves: true })));
-  const ownPoles = new Set(supply ? polesOf(supply) : []);
-  const ownTested = tested.some(({ second }) => ownPoles.has(second));
-  const against = [...tested, ...(ownTested ? [] : own), ...foreign];
-  const unique = new Map(
-    against
-      .filter(({ second }) => second !== terminal && second !== earth)
-      .reverse()
-      .map((each) => [each.second, each]),
-  );
-  return [...unique.values()].reverse().map(({ second, supply: tag, proves }) => ({
-    name: `pole.${second}`,
-    second,
-    supply: tag,
-    proves,
-  }));
+  const foreign = foreignSupplies(point).flatMap((tag) => {
+    const supply = facts.supply(tag ?? undefined);
+    return supply ? everyPole(supply) : [];
+  });
+  const found = new Map<string, Against>();
+  for (const { second, supply, proves } of [...tested, ...ownPoles(worked, tested), ...foreign]) {
+    if (second === terminal || second === earth) continue;
+    // The first that asks says whether it proves; the last that asks gives the place in the order.
+    const first = found.get(second) ?? { name: `pole.${second}`, second, supply, proves };
+    found.delete(second);
+    found.set(second, first);
+  }
+  return [...found.values()];
 }
 
 /** Earth first, then every pole. A supply nobody can name may be unearthed: then the pair to earth proves nothing. */
@@ -60,31 +65,37 @@ function readAgainst(facts: Facts, worked: PointFacts, terminal: string): Agains
   return [...(second === terminal ? [] : [toEarth]), ...polesAgainst(facts, worked, terminal)];
 }
 
-function readings(facts: Facts, worked: PointFacts, { name, terminal }: Conductor): Step[] {
+/** One pair, as AC and as DC: what the two steps have in common is shared, for a checklist holds thousands of pairs. */
+function readPair(facts: Facts, worked: PointFacts, { name, terminal }: Conductor, against: Against): Step[] {
   const { address } = worked.point;
-  return readAgainst(facts, worked, terminal).flatMap((against) =>
-    functions.map((function_) => {
-      const { second, supply, proves } = against;
-      return makeStep({
-        id: `wire.${address}.dead.${name}.${against.name}.${function_.toLowerCase()}`,
-        stage: 'wire',
-        family: 'terminal-dead',
-        title: say(`checklist.dead.read.${function_.toLowerCase()}`, { terminal, second }),
-        detail: proves ? [] : [say('checklist.dead.proves-nothing', { supply })],
-        where: terminal === worked.point.terminal ? worked.where : { point: address, terminal },
-        ask: deadReading(function_, facts.settings.deadLimitV, {
-          supply,
-          pair: `${terminal}/${second}`,
-          terminal,
-          second,
-          proves,
-        }),
-        personal: true,
-        picture: worked.loop,
-      });
-    }),
-  );
+  const { second, supply, proves } = against;
+  const dead = { supply, pair: `${terminal}/${second}`, terminal, second, proves };
+  const places = { terminal, second };
+  const where = terminal === worked.point.terminal ? worked.where : { point: address, terminal };
+  const detail = proves ? undefined : [say('checklist.dead.proves-nothing', { supply })];
+  const pair = `wire.${address}.dead.${name}.${against.name}`;
+  const read = (function_: 'AC' | 'DC', id: string, title: string) =>
+    makeStep({
+      id,
+      stage: 'wire',
+      family: 'terminal-dead',
+      title: say(title, places),
+      detail,
+      where,
+      ask: deadReading(function_, facts.settings.deadLimitV, dead),
+      personal: true,
+      picture: worked.loop,
+    });
+  return [
+    read('AC', `${pair}.ac`, 'checklist.dead.read.ac'),
+    read('DC', `${pair}.dc`, 'checklist.dead.read.dc'),
+  ];
 }
+
+const readings = (facts: Facts, worked: PointFacts, conductor: Conductor): Step[] =>
+  readAgainst(facts, worked, conductor.terminal).flatMap((against) =>
+    readPair(facts, worked, conductor, against),
+  );
 
 /** A plus or return that lands on a terminal which Prove dead already reads by name is not read twice. */
 export function terminalDead(facts: Facts, worked: PointFacts): Step[] {
