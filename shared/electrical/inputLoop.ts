@@ -80,10 +80,16 @@ export function solveInputLoop({ V, dropV, cableOhm, bleederOhm = Infinity, draw
   return { ...input, loopmA: input.mA + (bleederOhm === Infinity ? 0 : (input.V / bleederOhm) * 1000) };
 }
 
-/**
- * What an off device's leakage leaves at the input: at most the supply, at most `I·R`.
- * A constant-current input is taken at its own current as soon as the leakage reaches it.
- */
+/** Volts at the terminals that make an input draw a current. */
+function voltsAt(draw: Exclude<Draw, { kind: 'constant-current' }>, mA: number): number {
+  if (draw.kind === 'resistive') return (mA / 1000) * draw.ohm;
+  const { seriesOhm, parallelOhm, Vf } = draw;
+  if (parallelOhm !== undefined && (mA / 1000) * parallelOhm <= Vf)
+    return (mA / 1000) * (seriesOhm + parallelOhm);
+  return mA > 0 ? Vf + (mA / 1000) * seriesOhm : 0;
+}
+
+/** What an off device's leakage leaves at the input: at most the supply, else `I·R` of the input and what lies across it. */
 export function solveLeakage(off: {
   leakmA: number;
   highestV: number;
@@ -91,9 +97,10 @@ export function solveLeakage(off: {
   draw: Exclude<Draw, { kind: 'constant-current' }>;
 }): Solved {
   const { leakmA, highestV, bleederOhm = Infinity, draw } = off;
-  // A current source with the bleeder across it is a voltage source behind the bleeder; without one, a source that stiff.
-  const stiffOhm = bleederOhm === Infinity ? 1e9 : bleederOhm;
-  const seen = atTerminals(draw, (leakmA / 1000) * stiffOhm, stiffOhm);
-  const { V, mA, ledmA } = seen.V > highestV ? atTerminals(draw, highestV, 0) : seen;
-  return { V, mA, ...(ledmA !== undefined && { ledmA }), loopmA: leakmA };
+  // A current source with a resistor across it is a voltage source behind that resistor (Norton).
+  const openV =
+    bleederOhm === Infinity
+      ? voltsAt(draw, leakmA)
+      : atTerminals(draw, (leakmA / 1000) * bleederOhm, bleederOhm).V;
+  return { ...atTerminals(draw, Math.min(openV, highestV), 0), loopmA: leakmA };
 }

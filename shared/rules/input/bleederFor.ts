@@ -4,8 +4,8 @@ import { bleederAtMost, leakageBleeder, loadBleeder, type Bleeder } from '../../
 import { drawnmA } from '../../electrical/inputLoop';
 import type { Quantity, Remedy, StepSeed } from '../finding';
 import { say } from '../../panel/says';
+import { cableLoopOhm } from '../cableOhms';
 import { quantity } from '../rule';
-import { coreOhm } from './cableOhm';
 import { drawsOf, offOhm } from './draws';
 import { fittedDevices, worstDropV, worstLeakmA } from './fieldDevices';
 import type { InputPlace } from './inputPlace';
@@ -57,8 +57,8 @@ function loadNeed(at: InputPlace): number {
   const load = leastLoad(at, Infinity);
   if (!('is' in load) || load.is.mA >= load.is.minmA) return Infinity;
   const { minmA } = load.is;
-  const core = at.point.cable ? coreOhm(at.point.cable) : 0;
-  const lowestV = at.volts.minV - worstDropV(at) - (minmA / 1000) * 2 * core;
+  const cableOhm = at.point.cable ? cableLoopOhm(at.point.cable) : 0;
+  const lowestV = at.volts.minV - worstDropV(at) - (minmA / 1000) * cableOhm;
   const inputmA = Math.min(...drawsOf(at.io, 'max').models.map((draw) => drawnmA(draw, lowestV)));
   const made = loadBleeder({ lowestV, minmA, inputmA, highestV: at.volts.maxV });
   return made?.atMostOhm ?? Infinity;

@@ -2,8 +2,8 @@
 import type { InputState } from '../../electrical/inputState';
 import type { Solved } from '../../electrical/inputLoop';
 import type { Quantity } from '../finding';
+import { cableLoopOhm } from '../cableOhms';
 import { quantity } from '../rule';
-import { coreOhm } from './cableOhm';
 import { drawsOf } from './draws';
 import { conducts, fittedDevices, ledReversed, worstDropV } from './fieldDevices';
 import type { InputPlace } from './inputPlace';
@@ -34,7 +34,7 @@ function because(at: InputPlace, solved: Solved): Quantity[] {
     quantity('supply-low', volts.minV, 'V', volts.tolerancePath),
     quantity('device-drop', worstDropV(at), 'V', `${path}.device.dropV`),
     ...(point.cable
-      ? [quantity('cable-resistance', 2 * coreOhm(point.cable), 'ohm', 'IEC 60228 / ASTM B258 at 70 °C')]
+      ? [quantity('cable-resistance', cableLoopOhm(point.cable), 'ohm', 'IEC 60228 / ASTM B258 at 70 °C')]
       : []),
     quantity('input-volts', solved.V, 'V', 'solved loop'),
     quantity(io.kind === 'opto-input' ? 'led-current' : 'input-current', sensed(solved), 'mA', 'solved loop'),
@@ -88,7 +88,7 @@ export function neededV(at: InputPlace): number | undefined {
   const limits = limitsOf(at);
   const [draw] = drawsOf(at.io, 'max').models.slice(-1);
   if (!limits || !draw) return undefined;
-  const core = at.point.cable ? coreOhm(at.point.cable) : 0;
+  const cableOhm = at.point.cable ? cableLoopOhm(at.point.cable) : 0;
   const mA =
     draw.kind === 'constant-current'
       ? draw.mA
@@ -96,7 +96,7 @@ export function neededV(at: InputPlace): number | undefined {
         ? (limits.onV / draw.ohm) * 1000
         : ledmA(at, draw.Vf);
   const beside = at.point.bleeder ? (limits.onV / at.point.bleeder.ohm) * 1000 : 0;
-  return limits.onV + worstDropV(at) + ((mA + beside) / 1000) * 2 * core;
+  return limits.onV + worstDropV(at) + ((mA + beside) / 1000) * cableOhm;
 }
 
 const ledmA = ({ io }: InputPlace, Vf: number): number =>

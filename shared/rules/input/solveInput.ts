@@ -2,7 +2,7 @@
 import { ledRmsmA } from '../../electrical/acInput';
 import { parallel } from '../../electrical/bleeder';
 import { solveInputLoop, type Draw, type Solved } from '../../electrical/inputLoop';
-import { coreOhm } from './cableOhm';
+import { cableLoopOhm } from '../cableOhms';
 import { sensormA, worstDropV } from './fieldDevices';
 import { isAc, type InputPlace } from './inputPlace';
 
@@ -30,10 +30,10 @@ function withRmsLed(solved: Solved, draw: Draw, openV: number, sourceOhm: number
 
 export function solveInput(at: InputPlace, conditions: Conditions): Solved {
   const { V, draw, bleederOhm, noCable = false } = conditions;
-  const core = noCable || !at.point.cable ? 0 : coreOhm(at.point.cable);
-  const dropV = (conditions.dropV ?? worstDropV(at)) + (sensormA(at) / 1000) * core;
-  const solved = solveInputLoop({ V, dropV, cableOhm: 2 * core, bleederOhm, draw });
+  const cableOhm = noCable || !at.point.cable ? 0 : cableLoopOhm(at.point.cable);
+  const dropV = (conditions.dropV ?? worstDropV(at)) + (sensormA(at) / 1000) * (cableOhm / 2);
+  const solved = solveInputLoop({ V, dropV, cableOhm, bleederOhm, draw });
   if (!isAc(at)) return solved;
-  const share = bleederOhm === undefined ? 1 : bleederOhm / (bleederOhm + 2 * core);
-  return withRmsLed(solved, draw, Math.max(0, V - dropV) * share, parallel(2 * core, bleederOhm ?? Infinity));
+  const share = bleederOhm === undefined ? 1 : bleederOhm / (bleederOhm + cableOhm);
+  return withRmsLed(solved, draw, Math.max(0, V - dropV) * share, parallel(cableOhm, bleederOhm ?? Infinity));
 }
