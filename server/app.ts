@@ -9,6 +9,7 @@ import { healthRoutes } from './features/health/routes';
 import { readiness } from './features/health/service';
 import { panelsRoutes } from './features/panels/routes';
 import { peopleRoutes } from './features/people/routes';
+import { recordsRoutes } from './features/records/routes';
 import { sessionRoutes } from './features/sessions/routes';
 import { sitesRoutes } from './features/sites/routes';
 import { clientShell, staticClient } from './http/client';
@@ -37,6 +38,7 @@ export function createApp(services: Services): Express {
   app.use('/api', panelsRoutes(services.panels, services.revisions));
   app.use('/api', jobsRoutes(services.jobs, services.boards));
   app.use('/api', entriesRoutes(services.entries));
+  app.use('/api', recordsRoutes(services.records, services.verifying));
   app.use('/api', express.json({ limit: ordinaryBody, strict: true }));
   app.use('/api', sessionRoutes(limiterOn(services.database), services.session.passport, services.sessions));
   app.use('/api', peopleRoutes(services.people));

@@ -13,6 +13,10 @@ import { JobsService } from './features/jobs/service';
 import { JobTurns } from './features/jobs/turns';
 import { bossOf, mailQueueOf, type MailQueue } from './features/mail/queue';
 import { startMailWorker } from './features/mail/worker';
+import { RecordBooks } from './features/records/books';
+import { RecordPdfs } from './features/records/pdfStore';
+import { SealingService } from './features/records/service';
+import { RecordVerifying } from './features/records/verifying';
 import { RevisionsService } from './features/panels/revisions';
 import { PanelsService } from './features/panels/service';
 import { PeopleService } from './features/people/service';
@@ -36,6 +40,9 @@ export interface Services {
   boards: JobBoards;
   turns: JobTurns;
   entries: EntriesService;
+  sealing: SealingService;
+  records: RecordBooks;
+  verifying: RecordVerifying;
   /** Begins work in the background (mails). */
   start: () => Promise<void>;
   close: () => Promise<void>;
@@ -61,7 +68,14 @@ export async function createServices(config: Config): Promise<Services> {
   const boards = new JobBoards(database, people, folding, turns);
   const choices = new JobChoices(database, revisions, sites);
   const jobs = new JobsService({ database, mail, people, devices, choices, boards, turns });
-  const afterEntries = () => Promise.resolve();
+  const sealing = new SealingService({ database, turns, people, mail });
+  const panelOf = async (pack: string) => (await folding.pack(database.manager, pack)).panel;
+  const pdfs = new RecordPdfs({ database, baseUrl: config.baseUrl, panelOf });
+  const records = new RecordBooks(database, pdfs);
+  const verifying = new RecordVerifying(database);
+  const afterEntries = async (job: string) => {
+    await sealing.sealIfReady(job);
+  };
   const entries = new EntriesService({ database, people, devices, turns, boards, store, afterEntries });
   return {
     config,
@@ -79,7 +93,10 @@ export async function createServices(config: Config): Promise<Services> {
     boards,
     turns,
     entries,
-    start: () => startMailWorker(boss, config, log, () => Promise.resolve(null)),
+    sealing,
+    records,
+    verifying,
+    start: () => startMailWorker(boss, config, log, (record) => pdfs.of(record)),
     close: async () => {
       await boss.stop({ graceful: true, wait: true, timeout: 5_000 });
       await session.close();

@@ -5,12 +5,14 @@ import { EntryEntity, SetAsideEntity } from '../features/entries/entity';
 import { JobCounterEntity, JobEntity, JobPersonEntity, PackEntity } from '../features/jobs/entity';
 import { PanelEntity, PanelRevisionEntity } from '../features/panels/entity';
 import { MailTokenEntity, PersonEntity, PersonRoleEntity } from '../features/people/entity';
+import { RecordChainEntity, RecordEntity, RecordPdfEntity } from '../features/records/entity';
 import { SiteEntity } from '../features/sites/entity';
 import { Ground1764547200000 } from './migrations/1764547200000-Ground';
 import { Panels1764547260000 } from './migrations/1764547260000-Panels';
 import { Devices1764547320000 } from './migrations/1764547320000-Devices';
 import { Jobs1764547380000 } from './migrations/1764547380000-Jobs';
 import { Entries1764547440000 } from './migrations/1764547440000-Entries';
+import { Records1764547500000 } from './migrations/1764547500000-Records';
 
 const entities = [
   SiteEntity,
@@ -27,6 +29,9 @@ const entities = [
   PackEntity,
   EntryEntity,
   SetAsideEntity,
+  RecordChainEntity,
+  RecordEntity,
+  RecordPdfEntity,
 ];
 const migrations = [
   Ground1764547200000,
@@ -34,6 +39,7 @@ const migrations = [
   Devices1764547320000,
   Jobs1764547380000,
   Entries1764547440000,
+  Records1764547500000,
 ];
 
 /** As the owner of the tables: for migrations only. */

@@ -112,6 +112,13 @@ export const recordDocument = z.object({
       points: z.array(z.string()),
     }),
   ),
+  /** Steps sent back by the foreman, with the words that went along. */
+  returned: z.array(z.object({ shown: z.string(), words: z.string(), person: z.string(), at: instant })),
+  /** Where two answers stood side by side: which one was chosen, and why. */
+  chosen: z.array(z.object({ shown: z.string(), words: z.string(), person: z.string(), at: instant })),
+  /** What was found other than drawn, and notes. */
+  drawingDiffers: z.array(z.object({ words: z.string(), person: z.string(), at: instant })),
+  notes: z.array(z.object({ words: z.string(), person: z.string(), at: instant })),
   photos: z.array(
     z.object({ sha256: digest, shown: z.string().nullable(), person: z.string(), at: instant }),
   ),

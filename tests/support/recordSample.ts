@@ -115,6 +115,10 @@ export function sampleRecord(points: number, language: 'en' | 'es' = 'en'): Reco
     ],
     holds: [],
     rounds: [{ number: 1, reason: 'start', words: '', person: 'Ana Ribera', at: at(5), points: [] }],
+    returned: [],
+    chosen: [],
+    drawingDiffers: [],
+    notes: [],
     photos: [],
     signatures: [
       {

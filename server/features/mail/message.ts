@@ -9,6 +9,7 @@ export const mailKinds = [
   'countersign-wanted',
   'job-returned',
   'record-sealed',
+  'record-amended',
   'key-registered',
 ] as const;
 

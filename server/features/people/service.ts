@@ -200,6 +200,15 @@ export class PeopleService {
     return people.map(({ id, name, email, language }) => ({ id, name, email, language }));
   }
 
+  /** Everybody who is switched on and holds the role on the site, for mails to an office. */
+  async contactsWithRole(tx: EntityManager, site: string, role: Role): Promise<Contact[]> {
+    const people = await tx.find(PersonEntity, {
+      where: { active: true, roles: { site, role } },
+      order: { name: 'ASC', id: 'ASC' },
+    });
+    return people.map(({ id, name, email, language }) => ({ id, name, email, language }));
+  }
+
   /** Those of these people who are switched on and hold the role on the site. */
   async holders(tx: EntityManager, ids: readonly string[], site: string, role: Role): Promise<Set<string>> {
     const people = await tx.find(PersonEntity, {

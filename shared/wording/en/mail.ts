@@ -25,6 +25,10 @@ export const mail = {
   'mail.record-sealed.body':
     'Hello {name}.\nJob {job} on panel {panel} is signed, countersigned and sealed as record {number}.\nSeal: {seal}\nKeep this mail: it proves the record outside the database.',
   'mail.record-sealed.action': 'Open the record',
+  'mail.record-amended.subject': 'Amendment {number}: panel {panel}, job {job}',
+  'mail.record-amended.body':
+    'Hello {name}.\nEntries for job {job} on panel {panel} arrived after its record was sealed. They are sealed as amendment {number}. Read what changed: it may concern a lock, a hold or a reading out of limits.\nSeal: {seal}\nKeep this mail: it proves the record outside the database.',
+  'mail.record-amended.action': 'Read the amendment',
   'mail.key-registered.subject': 'Your signing key was set up on a device',
   'mail.key-registered.body':
     'Hello {name}.\nA signing key in your name was set up on the device "{device}". If that was not you, tell your administrator now.',

@@ -92,4 +92,8 @@ export const records = {
   'records.pdf.verify': 'Verify this record: scan the code, or drop this file at {url}',
   'records.pdf.page': 'Page',
   'records.pdf.pageOf': '{n} of {of}',
+  'records.returned': 'Sent back.',
+  'records.chosen': 'Two answers, one chosen.',
+  'records.drawingDiffers': 'Drawing differs.',
+  'records.note': 'Note.',
 } as const;

@@ -25,6 +25,10 @@ export const mail = {
   'mail.record-sealed.body':
     'Hola, {name}.\nEl trabajo {job} del cuadro {panel} está firmado, refrendado y sellado como registro {number}.\nSello: {seal}\nGuarde este correo: prueba el registro fuera de la base de datos.',
   'mail.record-sealed.action': 'Abrir el registro',
+  'mail.record-amended.subject': 'Enmienda {number}: tablero {panel}, trabajo {job}',
+  'mail.record-amended.body':
+    'Hola, {name}.\nLlegaron entradas del trabajo {job} en el tablero {panel} después de sellar su registro. Quedan selladas como enmienda {number}. Lea qué cambió: puede tratarse de un bloqueo, una retención o una lectura fuera de límites.\nSello: {seal}\nGuarde este correo: prueba el registro fuera de la base de datos.',
+  'mail.record-amended.action': 'Leer la enmienda',
   'mail.key-registered.subject': 'Su clave de firma se creó en un dispositivo',
   'mail.key-registered.body':
     'Hola, {name}.\nSe creó una clave de firma a su nombre en el dispositivo «{device}». Si no fue usted, avise ahora a su administrador.',

@@ -95,4 +95,8 @@ export const records = {
   'records.pdf.verify': 'Compruebe este registro: lea el código, o suelte este archivo en {url}',
   'records.pdf.page': 'Página',
   'records.pdf.pageOf': '{n} de {of}',
+  'records.returned': 'Devuelto.',
+  'records.chosen': 'Dos respuestas, una elegida.',
+  'records.drawingDiffers': 'El plano difiere.',
+  'records.note': 'Nota.',
 } as const satisfies Record<keyof typeof english, string>;

@@ -55,11 +55,30 @@ const findingLines = ({ document, words: { t } }: Printing): Line[] =>
     accepted ? `${says} ${t('office.acceptedBy', { name: accepted.by, reason: accepted.reason })}` : says,
   ]);
 
+const saidLines = ({ document, words: { t, at } }: Printing): Line[] => [
+  ...document.returned.map(({ shown, words, person, at: when }): Line => [
+    t('records.returned'),
+    `${shown}: ${words}. ${person}, ${at(when)}`,
+  ]),
+  ...document.chosen.map(({ shown, words, person, at: when }): Line => [
+    t('records.chosen'),
+    `${shown}: ${words}. ${person}, ${at(when)}`,
+  ]),
+  ...document.drawingDiffers.map(({ words, person, at: when }): Line => [
+    t('records.drawingDiffers'),
+    `${words}. ${person}, ${at(when)}`,
+  ]),
+  ...document.notes.map(({ words, person, at: when }): Line => [
+    t('records.note'),
+    `${words}. ${person}, ${at(when)}`,
+  ]),
+];
+
 export function exceptionsSection(printing: Printing): void {
   const { sheet, words } = printing;
   sheet.heading(words.t('records.exceptions'), 2);
-  const lines = [outLines, deadLines, lockLines, roundLines, holdLines, findingLines].flatMap((of) =>
-    of(printing),
+  const lines = [outLines, deadLines, lockLines, roundLines, holdLines, saidLines, findingLines].flatMap(
+    (of) => of(printing),
   );
   if (lines.length === 0) sheet.paragraph(words.t('records.exceptions.none'));
   for (const [what, says] of lines) sheet.paragraph(`${what}  ${says}`);
