@@ -1,7 +1,7 @@
 /** What must be measured before anyone touches a worked terminal, and between which two terminals. */
 import type { Group, Panel, Point, Supply } from '../panel/panelSchema';
 import { foreignSupplies } from './foreignSupplies';
-import { asRead } from './inOrder';
+import { inReadingOrder } from './inOrder';
 import { commonPole, conductorPole, probesAt, supplyProbes } from './poles';
 import type { Probe } from './poles';
 import { pointTerminals } from './pointTerminals';
@@ -18,7 +18,7 @@ interface Site {
 }
 
 function testOf(site: Site, at: DeadTest['at'], supply: Supply, probe: Probe, worked: boolean): DeadTest {
-  const place = Object.values(at)[0] ?? '';
+  const place = 'point' in at ? at.point : 'group' in at ? at.group : at.supply;
   const toEarth = probe.second === site.panel.earthTerminal;
   return {
     id: `dead.${place}.${probe.pair.replace('/', '-').replace(' ', '')}`,
@@ -93,7 +93,7 @@ function withOwnIds(tests: DeadTest[]): DeadTest[] {
   });
 }
 
-const byTag = <T extends { tag: string }>(items: T[]): T[] => [...items].sort((a, b) => asRead(a.tag, b.tag));
+const byTag = <T extends { tag: string }>(items: T[]): T[] => inReadingOrder(items, ({ tag }) => tag);
 
 /**
  * Every pair to be read dead: supplies at their own terminals, the commons they feed, points with foreign voltage and
@@ -114,7 +114,7 @@ export function deadTests(
   for (const group of panel.groups) groups.set(group.tag, [...(groups.get(group.tag) ?? []), group]);
   const site: Site = { panel, limitV: deadLimitV, supplies };
   const wanted = new Set(scope);
-  const points = [...panel.points].sort((a, b) => asRead(a.address, b.address));
+  const points = inReadingOrder(panel.points, (point) => point.address);
   return withOwnIds(
     eachOnce([
       ...dead.flatMap((supply) => atSupply(site, supply)),

@@ -24,6 +24,13 @@ export function graphOf(roots: NodeId[], edges: Edge[]): EnergyGraph {
   return { roots, edges, from };
 }
 
+/** The same graph up to the commons, for questions that are not about terminals. */
+export const withoutTerminals = (graph: EnergyGraph): EnergyGraph =>
+  graphOf(
+    graph.roots,
+    graph.edges.filter((edge) => !edge.to.startsWith('terminal:')),
+  );
+
 /** Builds the graph. Duplicate tags add up: a thing is live when any of its descriptions says so. */
 export function energyGraph(panel: Panel): EnergyGraph {
   const measured = panel.supplies.flatMap((supply) =>

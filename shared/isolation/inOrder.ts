@@ -3,17 +3,33 @@
 /** By UTF-16 code units. */
 export const byCodeUnits = (a: string, b: string): number => (a < b ? -1 : a > b ? 1 : 0);
 
-const parts = (tag: string): string[] => tag.match(/\d+|\D+/g) ?? [];
+const partsOf = (tag: string): string[] => tag.match(/\d+|\D+/g) ?? [];
 
-/** As a person reads terminals: X3:9 before X3:14; equal numbers fall back on code units. */
-export function asRead(a: string, b: string): number {
-  const other = parts(b);
-  for (const [place, part] of parts(a).entries()) {
-    const match = other[place];
+interface Read {
+  tag: string;
+  parts: string[];
+}
+
+function compareRead(a: Read, b: Read): number {
+  for (const [place, part] of a.parts.entries()) {
+    const match = b.parts[place];
     if (match === undefined) return 1;
     const numbers = /^\d/.test(part) && /^\d/.test(match);
     const difference = numbers ? Number(part) - Number(match) : byCodeUnits(part, match);
     if (difference !== 0) return difference;
   }
-  return a.length - b.length || byCodeUnits(a, b);
+  return a.tag.length - b.tag.length || byCodeUnits(a.tag, b.tag);
+}
+
+const read = (tag: string): Read => ({ tag, parts: partsOf(tag) });
+
+/** As a person reads terminals: X3:9 before X3:14; equal numbers fall back on code units. */
+export const asRead = (a: string, b: string): number => (a === b ? 0 : compareRead(read(a), read(b)));
+
+/** A sorted copy, as a person reads the tags; each tag is taken apart once. */
+export function inReadingOrder<T>(items: Iterable<T>, tagOf: (item: T) => string): T[] {
+  return [...items]
+    .map((item) => ({ item, ...read(tagOf(item)) }))
+    .sort(compareRead)
+    .map(({ item }) => item);
 }

@@ -1,7 +1,7 @@
 /** Which isolators to lock for work on a scope: the set of least weight that leaves no worked terminal reachable. */
 import type { Isolator, Panel, Source } from '../panel/panelSchema';
 import { asFound } from './asFound';
-import { energyGraph, graphOf } from './energyGraph';
+import { energyGraph, withoutTerminals } from './energyGraph';
 import type { EnergyGraph } from './energyGraph';
 import { node } from './graphEdge';
 import type { NodeId } from './graphEdge';
@@ -109,10 +109,7 @@ export function lockPlan(
 
 function cutOf(panel: Panel, graph: EnergyGraph, worked: Worked, mayGoOn: (() => boolean) | undefined) {
   // Terminals are dead when what feeds them is: without them the search walks a far smaller graph.
-  const inner = graphOf(
-    graph.roots,
-    graph.edges.filter((edge) => !edge.to.startsWith('terminal:')),
-  );
+  const inner = withoutTerminals(graph);
   const described = isolatorsByTag(panel);
   const cutting = new Set(inner.edges.flatMap((edge) => edge.cuts));
   const weights = new Map(

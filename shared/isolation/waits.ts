@@ -3,7 +3,7 @@ import type { Panel, Supply } from '../panel/panelSchema';
 import { dischargeSeconds } from './dischargeSeconds';
 import { asRead } from './inOrder';
 import type { Wait } from './types';
-import { workedTerminals } from './workedTerminals';
+import { workedSupplies } from './workedTerminals';
 
 // IEC 60204-1 6.2.4: live parts are to be at 60 V or less.
 const mayApproachV = 60;
@@ -63,7 +63,7 @@ export function waitOf(panel: Panel, supply: Supply): Wait | null {
  * measured and none is promised (unless the maker's stands in `statedS`).
  */
 export function waits(panel: Panel, scope: readonly string[]): Wait[] {
-  const worked = new Set(workedTerminals(panel, scope).supplies);
+  const worked = workedSupplies(panel, scope);
   return [...panel.supplies]
     .filter((supply) => worked.has(supply.tag))
     .sort((a, b) => asRead(a.tag, b.tag))

@@ -1,7 +1,7 @@
 /** What must be dead for work on a scope: its terminals, those of its groups, and every supply that enters the panel. */
-import type { Panel, Point } from '../panel/panelSchema';
+import type { Group, Panel, Point } from '../panel/panelSchema';
 import { foreignSupplies } from './foreignSupplies';
-import { asRead } from './inOrder';
+import { inReadingOrder } from './inOrder';
 import { mayStayOn } from './mayStayOn';
 import { pointTerminals } from './pointTerminals';
 import { supplyTerminals } from './supplyTerminals';
@@ -17,10 +17,25 @@ export interface Worked {
   mayStayOn: string[];
 }
 
+interface Known {
+  groups: Map<string, Group[]>;
+  supplies: Set<string>;
+}
+
+function knownIn(panel: Panel): Known {
+  const groups = new Map<string, Group[]>();
+  for (const group of panel.groups) {
+    const same = groups.get(group.tag);
+    if (same) same.push(group);
+    else groups.set(group.tag, [group]);
+  }
+  return { groups, supplies: new Set(panel.supplies.map((supply) => supply.tag)) };
+}
+
 /** Energy of unknown origin enters here: it is worked, since nobody can say what it reaches. */
-function unstated(panel: Panel, point: Point): boolean {
-  const groups = panel.groups.filter((group) => group.tag === point.group);
-  const supplies = new Set(panel.supplies.map((supply) => supply.tag));
+function unstated(known: Known, point: Point): boolean {
+  const { supplies } = known;
+  const groups = known.groups.get(point.group) ?? [];
   return (
     groups.length === 0 ||
     groups.some((group) => group.supply === undefined || !supplies.has(group.supply)) ||
@@ -37,7 +52,17 @@ function pointsInScope(panel: Panel, scope: readonly string[]): Point[] {
   return found;
 }
 
-const sorted = (tags: Iterable<string>): string[] => [...new Set(tags)].sort(asRead);
+const sorted = (tags: Iterable<string>): string[] => inReadingOrder(new Set(tags), (tag) => tag);
+
+/** A terminal of the device itself, however the drawing writes it: Q1:2, Q1.T1, Q1/3. */
+const isOn = (device: string, terminal: string): boolean =>
+  terminal.startsWith(device) && !/^[\p{L}\p{N}]/u.test(terminal.slice(device.length));
+
+/** Supplies that must be dead for work on these groups: all that enter the panel but those left on with a guard. */
+export function workedSupplies(panel: Panel, scope: readonly string[]): Set<string> {
+  const left = mayStayOn(panel, new Set(pointsInScope(panel, scope).map((point) => point.group)));
+  return new Set(panel.supplies.map((supply) => supply.tag).filter((tag) => !left.has(tag)));
+}
 
 /** @throws Error when the scope names an address that the panel does not have. */
 export function workedTerminals(panel: Panel, scope: readonly string[]): Worked {
@@ -45,14 +70,14 @@ export function workedTerminals(panel: Panel, scope: readonly string[]): Worked 
   const scopeGroups = new Set(points.map((point) => point.group));
   const left = mayStayOn(panel, scopeGroups);
   const supplies = panel.supplies.filter((supply) => !left.has(supply.tag));
-  const supplyTags = new Set(panel.supplies.map((supply) => supply.tag));
+  const known = knownIn(panel);
   const groups = panel.groups.filter(
-    (group) => scopeGroups.has(group.tag) || group.supply === undefined || !supplyTags.has(group.supply),
+    (group) => scopeGroups.has(group.tag) || group.supply === undefined || !known.supplies.has(group.supply),
   );
   const groupTags = new Set([...scopeGroups, ...groups.map((group) => group.tag)]);
   const touched = [
     ...panel.points
-      .filter((point) => groupTags.has(point.group) || unstated(panel, point))
+      .filter((point) => groupTags.has(point.group) || unstated(known, point))
       .flatMap((point) => pointTerminals(panel, point)),
     ...groups.map((group) => group.terminal),
   ];
@@ -63,7 +88,7 @@ export function workedTerminals(panel: Panel, scope: readonly string[]): Worked 
     incoming: sorted(
       panel.isolators
         .map((isolator) => isolator.tag)
-        .filter((tag) => touched.some((terminal) => terminal.startsWith(`${tag}:`))),
+        .filter((tag) => touched.some((terminal) => isOn(tag, terminal))),
     ),
     mayStayOn: sorted(left),
   };

@@ -2,11 +2,15 @@
 import { say } from '../../panel/says';
 import { node } from '../graphEdge';
 import { stillWorked } from '../lockPlan';
+import { reach } from '../reach';
+import { workedTerminals } from '../workedTerminals';
 import type { IsolationCheck } from './context';
 
 /** Names no place of its own, so that it stops every job on the scope. */
-export const noPlan: IsolationCheck = ({ plan, allOpen, worked }) => {
+export const noPlan: IsolationCheck = ({ panel, scope, plan }) => {
   if (plan !== null) return [];
+  const allOpen = reach(panel, new Set(panel.isolators.map((one) => one.tag)));
+  const worked = workedTerminals(panel, scope);
   const left = stillWorked(allOpen, worked);
   const place = left[0] ?? '';
   const live =

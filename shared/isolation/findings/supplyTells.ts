@@ -7,10 +7,11 @@ import { waitOf } from '../waits';
 import type { IsolationCheck, IsolationContext } from './context';
 
 function foreignAt({ panel, disconnectOpen }: IsolationContext, point: Point): Finding[] {
+  const foreign = foreignSupplies(point).filter((tag) => tag !== null);
+  if (foreign.length === 0) return [];
   const own = panel.groups.find((group) => group.tag === point.group)?.supply;
   const colours = panel.practice === 'NFPA 79' ? 'nfpa' : 'iec';
-  return foreignSupplies(point)
-    .filter((tag) => tag !== null)
+  return foreign
     .filter((tag) => tag !== own)
     .map((tag) => {
       const volts = panel.supplies.find((supply) => supply.tag === tag)?.V;
@@ -41,9 +42,9 @@ function foreignAt({ panel, disconnectOpen }: IsolationContext, point: Point): F
 export const foreignVoltage: IsolationCheck = (context) =>
   context.panel.points.flatMap((point) => foreignAt(context, point));
 
-export const storedUnknown: IsolationCheck = ({ panel, worked }) =>
+export const storedUnknown: IsolationCheck = ({ panel, workedSupplies }) =>
   panel.supplies.flatMap((supply) => {
-    const wait = worked.supplies.includes(supply.tag) ? waitOf(panel, supply) : null;
+    const wait = workedSupplies.has(supply.tag) ? waitOf(panel, supply) : null;
     if (wait === null || supply.bulk === 'none') return [];
     if (wait.t60S !== null || wait.statedS !== undefined) return [];
     return [
