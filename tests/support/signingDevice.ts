@@ -73,4 +73,4 @@ export class SignedLog {
   }
 }
 
-export const sha256 = (text: string): string => createHash('sha256').update(text).digest('hex');
+export const sha256 = (bytes: string | Buffer): string => createHash('sha256').update(bytes).digest('hex');
