@@ -1,4 +1,4 @@
-import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { z } from 'zod';
 import type { Role } from '../../shared/api/common';
 import { sessionView, type SessionView } from '../../shared/api/people';
@@ -18,16 +18,18 @@ export const sessionQuery = { queryKey: ['session'], queryFn: fetchSession, stal
 
 export const useSession = () => useQuery(sessionQuery);
 
+/** Whatever the person before could see goes; the session's own query stays, since screens are looking at it. */
+function becomes(client: QueryClient, session: SessionView | null): void {
+  client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== sessionQuery.queryKey[0] });
+  client.setQueryData(sessionQuery.queryKey, session);
+}
+
 export function useSignIn() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: { email: string; password: string }) =>
       request(sessionView, '/api/session', { method: 'POST', body }),
-    onSuccess: (session) => {
-      // Whatever the person before could see goes first.
-      client.clear();
-      client.setQueryData(sessionQuery.queryKey, session);
-    },
+    onSuccess: (session) => becomes(client, session),
   });
 }
 
@@ -35,10 +37,7 @@ export function useSignOut() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: () => request(z.unknown(), '/api/session', { method: 'DELETE' }),
-    onSuccess: () => {
-      client.clear();
-      client.setQueryData(sessionQuery.queryKey, null);
-    },
+    onSuccess: () => becomes(client, null),
   });
 }
 
