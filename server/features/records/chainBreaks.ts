@@ -1,7 +1,6 @@
 /** Walks the chain of every site, with the content of each record and its PDF, and names the first break. */
-import type { DataSource } from 'typeorm';
 import { breakAt, sha256Of, type Break, type Link } from './seal';
-import { chainOf, endHolds } from './verifying';
+import { chainOf, endHolds, type Queries } from './verifying';
 
 export interface ChainReport {
   site: string;
@@ -11,7 +10,7 @@ export interface ChainReport {
 
 /** Content and PDF one record at a time: a chain may be larger than memory. */
 async function contentBreak(
-  database: DataSource,
+  database: Queries,
   site: string,
   { number, digest }: Link,
 ): Promise<Break | null> {
@@ -26,10 +25,7 @@ async function contentBreak(
   return null;
 }
 
-async function breakOf(
-  database: DataSource,
-  site: string,
-): Promise<{ records: number; broken: Break | null }> {
+async function breakOf(database: Queries, site: string): Promise<{ records: number; broken: Break | null }> {
   const { links, end } = await chainOf(database, site);
   let before: Link | null = null;
   for (const link of links) {
@@ -41,7 +37,7 @@ async function breakOf(
   return { records: links.length, broken: cut };
 }
 
-export async function chainBreaks(database: DataSource): Promise<ChainReport[]> {
+export async function chainBreaks(database: Queries): Promise<ChainReport[]> {
   const sites = await database.query<{ id: string; name: string }[]>(
     `SELECT s.id, s.name FROM site s
      WHERE EXISTS (SELECT FROM record_chain c WHERE c.site = s.id) OR EXISTS (SELECT FROM record r WHERE r.site = s.id)

@@ -1,6 +1,8 @@
 /** What a job must be before it is sealed, as a list of small named checks. */
+import type { SignatureState } from '../../../shared/job/types';
 import type { FoldedJob } from '../jobs/folding';
 import type { SealableJob } from '../jobs/turns';
+import { digestFits } from './signedDigest';
 
 interface Facts {
   job: SealableJob;
@@ -19,16 +21,23 @@ export type Unready =
   | 'hold-undecided'
   | 'signer-without-access'
   | 'same-person'
-  | 'temporary-left';
+  | 'danger'
+  | 'temporary-left'
+  | 'digest';
 
 const settled: ReadonlySet<string> = new Set(['done', 'accepted', 'out-of-scope']);
 
-/** Signed with a key whose owner had lost access by the time the entry arrived: history, not consent. */
-function signedWithoutAccess({ folded }: Facts): boolean {
+const standing = ({ folded }: Facts): SignatureState[] => {
   const { signatures, countersign } = folded.state;
-  const standing = [...signatures.filter(({ stands }) => stands), ...(countersign ? [countersign] : [])];
-  const late = new Set(folded.entries.filter(({ afterAccess }) => afterAccess).map(({ entry }) => entry.id));
-  return standing.some(({ entry }) => late.has(entry));
+  return [...signatures.filter(({ stands }) => stands), ...(countersign ? [countersign] : [])];
+};
+
+/** Signed with a key whose owner had lost access by the time the entry arrived: history, not consent. */
+function signedWithoutAccess(facts: Facts): boolean {
+  const late = new Set(
+    facts.folded.entries.filter(({ afterAccess }) => afterAccess).map(({ entry }) => entry.id),
+  );
+  return standing(facts).some(({ entry }) => late.has(entry));
 }
 
 const checks: readonly [Unready, (facts: Facts) => boolean][] = [
@@ -59,13 +68,19 @@ const checks: readonly [Unready, (facts: Facts) => boolean][] = [
   [
     'same-person',
     ({ folded: { state } }) =>
-      state.signatures.some(({ person, stands }) => stands && person === state.countersign?.person),
+      [
+        ...state.tookPart,
+        ...state.signatures.filter(({ stands }) => stands).map(({ person }) => person),
+      ].includes(state.countersign?.person ?? ''),
   ],
+  ['danger', ({ folded: { state } }) => state.dangers.length > 0],
   [
     'temporary-left',
     ({ folded: { state } }) =>
       state.temporaries.some(({ body, removedBy }) => body.removes === undefined && removedBy === undefined),
   ],
+  // Last, for it folds the job once a signature.
+  ['digest', (facts) => standing(facts).some((each) => !digestFits(facts.folded, each))],
 ];
 
 /** Every reason why this job cannot be sealed; none means that it can. */

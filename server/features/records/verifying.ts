@@ -69,8 +69,13 @@ export interface ChainEnd {
   lastSeal: string | null;
 }
 
+/** Reads with SQL: the data source, or one connection inside a transaction. */
+export interface Queries {
+  query<T>(text: string, values?: unknown[]): Promise<T>;
+}
+
 export async function chainOf(
-  database: DataSource,
+  database: Queries,
   site: string,
 ): Promise<{ links: Link[]; end: ChainEnd | undefined }> {
   // One statement, so that a record sealed in this moment is in both or in neither.
