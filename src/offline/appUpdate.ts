@@ -6,13 +6,21 @@ const lookEveryMs = 3_600_000;
 
 export interface AppUpdates {
   /** Is a newer version on this device, ready to be used? */
-  waiting(): boolean;
-  subscribe(listener: () => void): () => void;
+  waiting: () => boolean;
+  subscribe: (listener: () => void) => () => void;
   /** Asks the server for a newer version; without a network nothing is found, which is no fault. */
-  look(): Promise<void>;
+  look: () => Promise<void>;
   /** Hands over to the newer version and loads the page anew. */
-  apply(): void;
+  apply: () => void;
 }
+
+/** Until a worker that is being fetched is whole, or was given up. */
+const settled = (worker: ServiceWorker): Promise<void> =>
+  new Promise((resolve) => {
+    worker.addEventListener('statechange', () => {
+      resolve();
+    });
+  });
 
 class WorkerUpdates implements AppUpdates {
   private readonly worker = new Workbox('/sw.js');
@@ -39,7 +47,11 @@ class WorkerUpdates implements AppUpdates {
     return () => this.listeners.delete(listener);
   };
 
-  look = () => this.worker.update().catch(() => undefined);
+  look = async () => {
+    await this.worker.update().catch(() => undefined);
+    const registration = await navigator.serviceWorker.getRegistration();
+    if (registration?.installing) await settled(registration.installing);
+  };
 
   apply = () => {
     this.worker.addEventListener('controlling', () => {
