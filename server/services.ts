@@ -73,9 +73,11 @@ export async function createServices(config: Config): Promise<Services> {
   const pdfs = new RecordPdfs({ database, baseUrl: config.baseUrl, panelOf });
   const records = new RecordBooks(database, pdfs);
   const verifying = new RecordVerifying(database);
-  const afterEntries = async (job: string) => {
-    await sealing.sealIfReady(job);
-  };
+  const afterEntries = (job: string) =>
+    sealing.sealIfReady(job).then(
+      () => undefined,
+      (error: unknown) => log.error({ err: error, job }, 'sealing failed; the next push tries again'),
+    );
   const entries = new EntriesService({ database, people, devices, turns, boards, store, afterEntries });
   return {
     config,

@@ -17,7 +17,6 @@ import { addEntries, addSetAside, headsOf, readHeld, type NewEntry } from './wri
 
 type Push = z.output<typeof entriesRequest>;
 type Answer = z.output<typeof entriesAnswer>;
-type Status = EntriesPage['status'];
 
 export interface EntryParts {
   database: DataSource;
@@ -26,7 +25,7 @@ export interface EntryParts {
   turns: JobTurns;
   boards: JobBoards;
   store: EntryStore;
-  /** Called after new entries of a countersigned or sealed job are committed; it must not throw for what it finds. */
+  /** Called after a push to a countersigned or sealed job is committed; what is acknowledged stays so, whatever it does. */
   afterEntries: (job: string) => Promise<void>;
 }
 
@@ -44,8 +43,8 @@ export class EntriesService {
     const arrivals = arrivalsOf(push.entries, (log) => push.logs[log] ?? '');
     await verifyBranches(arrivals, keys);
     const kept = await this.parts.database.transaction((tx) => this.keep(tx, job, arrivals, keys));
-    if (kept.isNew && (kept.status === 'countersigned' || kept.status === 'sealed'))
-      await this.parts.afterEntries(job);
+    // Asked for a repeated push too: a seal that failed is tried again.
+    if (kept.status === 'countersigned' || kept.status === 'sealed') await this.parts.afterEntries(job);
     return { acknowledged: kept.acknowledged };
   }
 
@@ -75,9 +74,9 @@ export class EntriesService {
     // Another job can take the same id in this moment; sent again, the entry is seen and set aside.
     if ((await addEntries(tx, id, fresh, at)) < fresh.length)
       throw new Refused(503, 'busy', {}, [], { 'retry-after': '1' });
-    const status: Status | null =
-      fresh.length > 0 ? await this.parts.turns.heard(tx, id, job.lastOrder + fresh.length, at) : null;
-    return { acknowledged: acknowledge(arrivals, sorted, fresh), status, isNew: fresh.length > 0 };
+    const status =
+      fresh.length > 0 ? await this.parts.turns.heard(tx, id, job.lastOrder + fresh.length, at) : job.status;
+    return { acknowledged: acknowledge(arrivals, sorted, fresh), status };
   }
 
   private async mustKnowPacks(tx: EntityManager, job: string, arrivals: Arrival[]): Promise<void> {

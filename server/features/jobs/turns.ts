@@ -10,13 +10,15 @@ import type { FoldedJob, Folding } from './folding';
 import { jobNumber } from './mapper';
 import { progressOf, statusOf } from './progress';
 
+type Status = JobEntity['status'];
+
 /** A job as the entries that arrive for it need it, its row taken until the transaction ends. */
 export interface TakenJob {
   id: string;
   site: string;
   lastOrder: number;
+  status: Status;
 }
-type Status = JobEntity['status'];
 
 export class JobTurns {
   constructor(
@@ -30,7 +32,7 @@ export class JobTurns {
   async take(tx: EntityManager, id: string): Promise<TakenJob> {
     const job = await tx.findOne(JobEntity, { where: { id }, lock: { mode: 'pessimistic_write' } });
     if (!job) throw notFound();
-    return { id: job.id, site: job.site, lastOrder: job.lastOrder };
+    return { id: job.id, site: job.site, lastOrder: job.lastOrder, status: job.status };
   }
 
   /** Those of these digests that name a pack once issued for the job. */
