@@ -148,10 +148,11 @@ export const lamp24 = (tag: string, location: string): DeviceOf<'load'> => ({
   pickUpPct: 70,
   dropOutPct: 10,
   polarised: true,
+  reversed: false,
   suppressed: true,
 });
 
-export const diode: Suppressor = { kind: 'diode', at: 'load', V: 400, A: 1 };
+export const diode: Suppressor = { kind: 'diode', at: 'load', V: 400, A: 1, reversed: false };
 
 interface Wired {
   module: string;
@@ -192,6 +193,10 @@ export function inputPoint({ module, number, group, description, device, lengthM
   };
 }
 
+/** The return strip beside a card: X3 for cards by name, X7 for a card whose terminals are a strip already. */
+const returnTerminal = (module: string, number: number): string =>
+  module.startsWith('X') ? `X7:${number}` : `X3:${module}.${number}`;
+
 /** An output with its load: the switched core and the return core, in the colour of its circuit. */
 export function outputPoint(
   { module, number, group, description, device, lengthM }: Wired,
@@ -207,7 +212,7 @@ export function outputPoint(
     group,
     conductors: [
       { role: 'signal', wire, colour: returns.signal, terminal: `${module}:${number}` },
-      { role: returns.role, wire: `${wire}R`, colour: returns.colour, terminal: `X3:${module}.${number}` },
+      { role: returns.role, wire: `${wire}R`, colour: returns.colour, terminal: returnTerminal(module, number) },
     ],
     device,
     cable: cable(`W-${module}-${number}`, lengthM, 2),

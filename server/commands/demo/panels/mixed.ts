@@ -209,7 +209,7 @@ const modules: Panel['modules'] = [
       ...face('X5', 21, 22, 'X5:C2'),
       ...face('X5', 31, 32, 'X5:C3'),
     ],
-    commonInsulationV: 300,
+    commonInsulationV: 400,
     terminalRange,
     io: {
       kind: 'digital-output',
