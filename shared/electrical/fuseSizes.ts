@@ -27,3 +27,7 @@ export function surelyOpensA(A: number, kind: FuseKind | undefined): number {
   if (A <= 4) return 2.1 * A;
   return (A < 16 ? 1.9 : 1.6) * A;
 }
+
+/** Whether a device protects a conductor: I_n ≤ I_z and I₂ ≤ 1.45·I_z (IEC 60364-4-43). */
+export const protectsWire = (A: number, kind: FuseKind | undefined, ampacityA: number): boolean =>
+  A <= ampacityA && surelyOpensA(A, kind) <= 1.45 * ampacityA * (1 + 1e-9);

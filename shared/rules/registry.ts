@@ -1,4 +1,6 @@
 /** Every wiring rule, in the order in which their findings are listed. */
+import { analogueRules } from './analogueRules';
+import { conductorRules } from './conductorRules';
 import { dataRules } from './dataRules';
 import { inputRules } from './inputRules';
 import { outputRules } from './outputRules';
@@ -7,4 +9,11 @@ import { supplyRules } from './supplyRules';
 
 export const ruleSetVersion = '2026.1';
 
-export const rules: readonly Rule[] = [...supplyRules, ...inputRules, ...outputRules, ...dataRules];
+export const rules: readonly Rule[] = [
+  ...supplyRules,
+  ...inputRules,
+  ...outputRules,
+  ...conductorRules,
+  ...analogueRules,
+  ...dataRules,
+];

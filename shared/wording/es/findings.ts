@@ -1,3 +1,5 @@
+import { analogues } from './findings/analogues';
+import { conductors } from './findings/conductors';
 import { data } from './findings/data';
 import { general } from './findings/general';
 import { inputs } from './findings/inputs';
@@ -12,6 +14,8 @@ export const findings = {
   ...inputs,
   ...data,
   ...outputs,
+  ...conductors,
+  ...analogues,
   ...outputQuantities,
   ...quantities,
 } as const;
