@@ -9,6 +9,7 @@ import { paths } from '../../src/app/paths';
 import { axeFindings, sticksOut } from '../support/browser/axe';
 import { deskSize, launch, phoneSize } from '../support/browser/chromium';
 import { enrolOnPage } from '../support/browser/enrolOnPage';
+import { keepPicturesOfFailures } from '../support/browser/keepPictures';
 import { liveServer, type LiveServer } from '../support/browser/liveServer';
 import { signInOnPage } from '../support/browser/signInPage';
 
@@ -25,6 +26,7 @@ describe('axe', () => {
     await seedDemo(server.services);
     browser = await launch();
   });
+  keepPicturesOfFailures(() => browser);
   afterAll(async () => {
     await browser.close();
     await server.close();

@@ -14,6 +14,7 @@ import { paths } from '../../src/app/paths';
 import { seedPerson, seedSite } from '../support/seedPeople';
 import { enrolOnPage } from '../support/browser/enrolOnPage';
 import { deskContext, launch, phoneContext } from '../support/browser/chromium';
+import { keepPicturesOfFailures } from '../support/browser/keepPictures';
 import { liveServer, type LiveServer } from '../support/browser/liveServer';
 import { issueRevision, sendJob, uploadPanel } from '../support/browser/office';
 import {
@@ -32,6 +33,13 @@ const electrician = 'Ines Varga';
 const foreman = 'Ruth Adeyemi';
 const engineer = 'Nora Castell';
 const officer = 'Oskar Brandt';
+const tester = {
+  make: 'Two-pole tester',
+  number: 'VT-031',
+  category: 'CAT III' as const,
+  ratedV: 690,
+  checkDue: '2099-06-30',
+};
 const emailOf = (name: string) => `${name.toLowerCase().replaceAll(' ', '.')}@example.org`;
 const t = (key: keyof typeof en, params: Record<string, string | number> = {}) =>
   render('en', { key, params });
@@ -76,12 +84,13 @@ describe('the main job', () => {
   beforeAll(async () => {
     server = await liveServer();
     browser = await launch();
-    const site = await seedSite(server.services, 'Halden Quay Water Works');
+    const site = await seedSite(server.services, 'Halden Quay Water Works', [tester]);
     await seedPerson(server.services, electrician, [{ site, role: 'electrician' }]);
     await seedPerson(server.services, foreman, [{ site, role: 'foreman' }]);
     await seedPerson(server.services, engineer, [{ site, role: 'panel-engineer' }]);
     await seedPerson(server.services, officer, [{ site, role: 'safety-officer' }]);
   });
+  keepPicturesOfFailures(() => browser);
   afterAll(async () => {
     await browser.close();
     await server.close();

@@ -2,6 +2,7 @@
 import type { Express } from 'express';
 import request from 'supertest';
 import { v7 } from 'uuid';
+import type { SiteSettings } from '../../shared/api/sites';
 import type { Role } from '../../shared/api/common';
 import { hashPassword } from '../../server/features/people/password';
 import type { Services } from '../../server/services';
@@ -9,7 +10,11 @@ import type { Services } from '../../server/services';
 export const testPassword = 'a long test password';
 let hashed: Promise<string> | undefined;
 
-export async function seedSite(services: Services, name: string): Promise<string> {
+export async function seedSite(
+  services: Services,
+  name: string,
+  instruments: SiteSettings['instruments'] = [],
+): Promise<string> {
   const id = v7();
   const settings = {
     emergencyNumber: '112',
@@ -17,7 +22,7 @@ export async function seedSite(services: Services, name: string): Promise<string
     deadLimitV: 1,
     permitAsked: false,
     ferruleScheme: 'DIN 46228-4',
-    instruments: [],
+    instruments,
   };
   await services.database.query('INSERT INTO site (id, name, settings) VALUES ($1, $2, $3)', [
     id,
