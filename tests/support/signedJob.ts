@@ -7,7 +7,7 @@ import { logId } from '../../shared/job/logId';
 import { signatureDigest } from '../../shared/job/signatureDigest';
 import type { JobPerson } from '../../shared/job/types';
 import { canSign } from '../../shared/job/canSign';
-import { Job, walk, type Device, type Otherwise } from './jobScenario';
+import { answerWell, Job, sayClear, walk, type Device, type Otherwise } from './jobScenario';
 import type { Agent } from './seedPeople';
 import { signed, type SigningDevice } from './signingDevice';
 
@@ -78,11 +78,20 @@ export class SignedJob extends Job {
     return { name: person.name, zone: 'Europe/Madrid', meaning, digest, language: 'en' as const, picture };
   }
 
-  /** The electrician does everything; `otherwise` may answer a step in its own way. */
+  /** The electrician does everything, straight down the checklist; with `otherwise`, step by step as it comes next. */
   work(otherwise?: Otherwise): void {
     const worker = this.person('electrician');
     this.write(worker, 'accepted', {});
-    walk(this, worker, undefined, otherwise);
+    if (otherwise) walk(this, worker, undefined, otherwise);
+    else this.straightDown(worker);
+  }
+
+  private straightDown(worker: JobPerson): void {
+    const firstClose = this.checklist.steps.find(({ ask }) => ask.kind === 'close');
+    for (const step of this.checklist.steps) {
+      if (step === firstClose) sayClear(this);
+      answerWell(this, worker, step);
+    }
   }
 
   sign(person = this.person('electrician')): void {
