@@ -30,8 +30,7 @@ const many = <T>(n: number, make: (index: number) => T): T[] => Array.from({ len
 
 function randomSource(r: Random, index: number): Source {
   const phases = r.pick([1, 1, 3] as const);
-  const { V, phases: ignored, ...bare } = source(`IN${index}`);
-  void ignored;
+  const { V, phases: _phases, ...bare } = source(`IN${index}`);
   return r.chance(0.8) ? { ...bare, V: phases === 3 ? 208 : (V ?? 120), phases } : bare;
 }
 

@@ -189,11 +189,11 @@ describe('foreign voltage and back-feed', () => {
       groups,
       points: [point('A', 'G', more), point('B', 'G'), point('C', 'H')],
     });
-  const after = (more: Partial<Point>, open: string[], groups?: Panel['groups']) =>
-    Object.fromEntries(
+  const after = (more: Partial<Point>, open: string[], groups?: Panel['groups']): Record<string, boolean> =>
+    Object.fromEntries<boolean>(
       stillLive(made(more, groups), new Set(open))
         .filter(({ terminal }) => terminal !== undefined && !/^(OWN|FOR):/.test(terminal))
-        .map(({ terminal, maybe }) => [terminal, maybe]),
+        .map(({ terminal = '', maybe }) => [terminal, maybe]),
     );
   const relay: Point['device'] = {
     kind: 'ssr-control',
