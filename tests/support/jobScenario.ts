@@ -5,6 +5,7 @@ import type { AnswerValue, BodyOf, Entry, EntryKind } from '../../shared/job/ent
 import { entryHash } from '../../shared/job/entryBytes';
 import { canSign } from '../../shared/job/canSign';
 import { foldJob } from '../../shared/job/fold';
+import { gateFor } from '../../shared/job/gates';
 import { nextStep } from '../../shared/job/next';
 import type { JobFacts, JobPerson, JobState } from '../../shared/job/types';
 
@@ -86,6 +87,22 @@ export class Job {
     const device = this.device(person);
     this.hear(device);
     return this.writeDeaf(device, kind, body);
+  }
+
+  /** The same job so far, to go on with in another way. */
+  copy(): Job {
+    const { people: on, logs } = this.facts;
+    const job = new Job(this.checklist, { people: on, logs: { ...logs } }, this.id, this.pack);
+    job.entries.push(...this.entries);
+    for (const [key, device] of this.devices)
+      job.devices.set(key, { ...device, heard: new Map(device.heard) });
+    job.minutes = this.minutes;
+    return job;
+  }
+
+  /** What this device holds: its own and what it has heard. */
+  held(device: Device): Entry[] {
+    return this.entries.filter(({ log, seq }) => log === device.log || seq <= (device.heard.get(log) ?? 0));
   }
 
   state(): JobState {
@@ -182,7 +199,8 @@ export function countersign(job: Job, person: JobPerson): Entry {
 export type Otherwise = (step: Step, job: Job) => boolean;
 
 /**
- * The person follows the next step, over and over, until nothing waits for them, or a step of `until` does.
+ * The person follows the next step, over and over, until nothing waits for them, a step of `until` does,
+ * or the step that waits is shut.
  * Whoever is on the job says to be clear when the first isolator would be closed.
  */
 export function walk(job: Job, person: JobPerson, until?: Stage, otherwise?: Otherwise): void {
@@ -193,6 +211,7 @@ export function walk(job: Job, person: JobPerson, until?: Stage, otherwise?: Oth
     if (!step || stages.indexOf(step.stage) >= end) return;
     if (step.ask.kind === 'close' && !state.clear.includes(person.id)) sayClear(job);
     if (otherwise?.(step, job)) continue;
+    if (!gateFor(job.checklist, state, person.id, step.id).open) return;
     answerWell(job, person, step);
   }
 }
@@ -220,5 +239,22 @@ export function completeJob(checklist: Checklist, on: JobPerson[] = [mara, tomas
   const foreman = on.find(({ part }) => part === 'foreman');
   if (worker) sign(job, worker);
   if (foreman) countersign(job, foreman);
+  return job;
+}
+
+/**
+ * The same job written straight down in the order of the checklist, without asking what comes next:
+ * quick for thousands of steps. One electrician; every answer is good.
+ */
+export function plainJob(checklist: Checklist, on: JobPerson[] = [mara, tomas]): Job {
+  const job = newJob(checklist, on);
+  const [worker] = on;
+  if (!worker) throw new Error('a job needs somebody who works');
+  job.write(worker, 'accepted', {});
+  const firstClose = checklist.steps.find(({ ask }) => ask.kind === 'close');
+  for (const step of checklist.steps) {
+    if (step === firstClose) sayClear(job);
+    answerWell(job, worker, step);
+  }
   return job;
 }
