@@ -20,6 +20,11 @@ const hides: Record<string, readonly string[]> = {
   'output.ssr-control': ['output.load-underfed'],
 };
 
+/** At one group: the supply against the outputs is said once, by the output's own rule. */
+const hidesInGroup: Record<string, readonly string[]> = {
+  'output.voltage-window': ['supply.level-high', 'supply.level-low'],
+};
+
 /** A doubt for want of a datum explains nothing, so it hides nothing. */
 const isCause = (finding: Finding) => finding.says.key !== 'finding.lacks';
 
@@ -27,8 +32,11 @@ const isCause = (finding: Finding) => finding.says.key !== 'finding.lacks';
 export function withoutExplained(findings: Finding[], context: RuleContext): Finding[] {
   const hidden = new Set<string>();
   for (const finding of findings) {
-    const { point } = finding.where;
-    if (point === undefined || !isCause(finding)) continue;
+    const { point, group } = finding.where;
+    if (!isCause(finding)) continue;
+    if (group !== undefined && point === undefined)
+      for (const rule of hidesInGroup[finding.rule] ?? []) hidden.add(`${rule} group ${group}`);
+    if (point === undefined) continue;
     for (const rule of hides[finding.rule] ?? []) {
       hidden.add(`${rule} point ${point}`);
       for (const place of context.pointsByAddress.get(point) ?? [])
