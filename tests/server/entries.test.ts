@@ -1,69 +1,30 @@
 import { gzipSync } from 'node:zlib';
-import { Client } from 'pg';
-import request from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import request from 'supertest';
 import { v7 } from 'uuid';
-import { entriesAnswer, entriesPage, headsProblem } from '../../shared/api/jobs';
+import { entriesAnswer, headsProblem } from '../../shared/api/jobs';
 import type { Entry } from '../../shared/job/entry';
 import { entryHash } from '../../shared/job/entryBytes';
-import { healthyPanel } from '../../server/commands/demo/panels/healthy';
-import { seedPerson, seedSite, signIn, type Agent } from '../support/seedPeople';
-import { issuePanel, sendJob } from '../support/seedJobs';
-import { enrolDevice, newDevice, SignedLog, signed, type SigningDevice } from '../support/signingDevice';
-import { testServices, type TestServer } from '../support/testServices';
+import * as pushes from '../support/entryPushes';
+import { changed, withoutSignature } from '../support/entryPushes';
+import { seedWorks, type Works } from '../support/seedWorks';
+import { enrolDevice, newDevice, signed, type SigningDevice, SignedLog } from '../support/signingDevice';
+import type { TestServer } from '../support/testServices';
 
+let works: Works;
 let server: TestServer;
-let foreman: Agent;
-let electrician: Agent;
-let colleague: Agent;
-let stranger: Agent;
-let admin: Agent;
-let ada: { id: string };
-let bo: { id: string };
-let lead: { id: string };
-let panel: string;
 let device: SigningDevice;
 
 beforeAll(async () => {
-  server = await testServices();
-  const site = await seedSite(server.services, 'Halden Quay');
-  const otherSite = await seedSite(server.services, 'Elsewhere');
-  await seedPerson(server.services, 'Pia Panel', [{ site, role: 'panel-engineer' }]);
-  lead = await seedPerson(server.services, 'Finn Foreman', [{ site, role: 'foreman' }]);
-  ada = await seedPerson(server.services, 'Ada Electrician', [{ site, role: 'electrician' }]);
-  bo = await seedPerson(server.services, 'Bo Electrician', [{ site, role: 'electrician' }]);
-  await seedPerson(server.services, 'Cy Electrician', [{ site, role: 'electrician' }]);
-  await seedPerson(server.services, 'Otto Other', [{ site: otherSite, role: 'foreman' }]);
-  await seedPerson(server.services, 'Ann Admin', [{ site, role: 'administrator' }]);
-  const engineer = await signIn(server.app, 'pia.panel@example.org');
-  foreman = await signIn(server.app, 'finn.foreman@example.org');
-  electrician = await signIn(server.app, 'ada.electrician@example.org');
-  colleague = await signIn(server.app, 'cy.electrician@example.org');
-  stranger = await signIn(server.app, 'otto.other@example.org');
-  admin = await signIn(server.app, 'ann.admin@example.org');
-  panel = await issuePanel(engineer, site, healthyPanel);
-  device = await enrolDevice(electrician);
+  works = await seedWorks();
+  ({ server, device } = works);
 });
 afterAll(() => server.close());
 
-const points = healthyPanel.points.slice(0, 2).map(({ address }) => address);
-async function newLog(by = device): Promise<SignedLog> {
-  const { job, pack } = await sendJob(foreman, panel, points, {
-    electricians: [ada.id, bo.id],
-    foreman: lead.id,
-  });
-  return new SignedLog(by, job, pack);
-}
-/** Delivery needs no session. */
-const push = (log: SignedLog, entries: readonly Entry[] = log.entries) =>
-  request(server.app).post(`/api/jobs/${log.job}/entries`).send(log.push(entries));
-const pull = async (log: SignedLog, after = 0) =>
-  entriesPage.parse((await electrician.get(`/api/jobs/${log.job}/entries?after=${after}`).expect(200)).body);
-const stored = (log: SignedLog) =>
-  server.services.database.query<{ id: string; order: number; hash: string; after_access: boolean }[]>(
-    'SELECT id, "order", hash, after_access FROM entry WHERE job = $1 ORDER BY "order"',
-    [log.job],
-  );
+const newLog = (by?: SigningDevice) => pushes.newLog(works, by);
+const push = (log: SignedLog, entries?: readonly Entry[]) => pushes.push(works, log, entries);
+const pull = (log: SignedLog, after?: number) => pushes.pull(works, log, after);
+const stored = (log: SignedLog) => pushes.stored(works, log);
 
 describe('pushing entries', () => {
   it('keeps them in commit order with the hash of what was received, and needs no session', async () => {
@@ -78,7 +39,7 @@ describe('pushing entries', () => {
     expect(page.entries.map(({ order: _order, receivedAt: _at, ...entry }) => entry)).toEqual(log.entries);
     expect(page).toMatchObject({ after: 3, more: false });
     expect(page.logs).toEqual([
-      { log: log.log, key: device.key, person: ada.id, publicKey: device.publicKey },
+      { log: log.log, key: device.key, person: works.electricianId, publicKey: device.publicKey },
     ]);
   });
 
@@ -105,7 +66,7 @@ describe('pushing entries', () => {
 
   it('gives two logs orders without a gap or a double', async () => {
     const log = await newLog();
-    const own = new SignedLog(await enrolDevice(electrician), log.job, log.pack);
+    const own = new SignedLog(await enrolDevice(works.electrician), log.job, log.pack);
     for (let n = 0; n < 30; n += 1) {
       log.add();
       own.add();
@@ -205,9 +166,6 @@ describe('a log that does not join', () => {
   });
 });
 
-const withoutSignature = ({ signature: _signature, ...rest }: Entry): Omit<Entry, 'signature'> => rest;
-const changed = (log: SignedLog, change: Partial<Entry>): Entry[] =>
-  log.entries.map((entry) => signed(log.by, { ...withoutSignature(entry), ...change }));
 function jump(log: SignedLog): Entry[] {
   const [first] = log.entries;
   if (!first) throw new Error('the log is empty');
@@ -358,86 +316,5 @@ describe('refused pushes', () => {
       .expect(status);
     expect(answer.type).toBe('application/problem+json');
     expect(await stored(log)).toHaveLength(0);
-  });
-});
-
-describe('pulling entries', () => {
-  it('pages by the cursor and stays on it when nothing is new', async () => {
-    const log = await newLog();
-    for (let n = 0; n < 3; n += 1) log.add();
-    await push(log).expect(200);
-    expect((await pull(log, 2)).entries.map(({ seq }) => seq)).toEqual([3]);
-    expect(await pull(log, 3)).toMatchObject({ entries: [], after: 3, more: false });
-  });
-
-  it('says when there is more than a page', async () => {
-    const log = await newLog();
-    for (let n = 0; n < 510; n += 1) log.add();
-    await push(log, log.entries.slice(0, 500)).expect(200);
-    await push(log, log.entries.slice(500)).expect(200);
-    const first = await pull(log);
-    expect(first).toMatchObject({ after: 500, more: true });
-    expect((await pull(log, first.after)).entries).toHaveLength(10);
-  });
-
-  it('needs a session and a part in the job or an office of its site', async () => {
-    const log = await newLog();
-    await request(server.app).get(`/api/jobs/${log.job}/entries`).expect(401);
-    await colleague.get(`/api/jobs/${log.job}/entries`).expect(404);
-    await stranger.get(`/api/jobs/${log.job}/entries`).expect(404);
-    await foreman.get(`/api/jobs/${log.job}/entries`).expect(200);
-  });
-});
-
-describe('after access has ended', () => {
-  it('what was signed is still taken, and marked', async () => {
-    const log = await newLog();
-    log.add();
-    await push(log).expect(200);
-    const lost = await enrolDevice(electrician);
-    const late = new SignedLog(lost, log.job, log.pack);
-    late.add({ kind: 'accepted', body: {} });
-    await admin.post(`/api/devices/${lost.device}/revoke`).expect(200);
-    await push(late).expect(200);
-    expect((await stored(log)).map((each) => each.after_access)).toEqual([false, true]);
-    electrician = await signIn(server.app, 'ada.electrician@example.org');
-  });
-});
-
-describe('whose turn it is', () => {
-  it('moves the job on when it is accepted', async () => {
-    const log = await newLog();
-    log.add({ kind: 'accepted', body: {} });
-    await push(log).expect(200);
-    const view = (await foreman.get(`/api/jobs/${log.job}`).expect(200)).body;
-    expect(view.status).not.toBe('sent');
-    expect(view.lastHeard).not.toBeNull();
-  });
-});
-
-describe('what was received', () => {
-  it('cannot be changed, deleted or emptied, not even by the tables’ owner', async () => {
-    const log = await newLog();
-    const first = log.add();
-    await push(log).expect(200);
-    await push(log, [signed(device, { ...withoutSignature(first), body: { words: 'Other' } })]).expect(200);
-    const client = new Client({ connectionString: server.ownerUrl });
-    await client.connect();
-    for (const table of ['entry', 'entry_set_aside', 'pack', 'device_key'])
-      for (const sql of [
-        `UPDATE ${table} SET job = job`,
-        `DELETE FROM ${table}`,
-        `TRUNCATE ${table} CASCADE`,
-      ])
-        await expect(
-          client.query(
-            sql.replace('SET job = job', table === 'device_key' ? 'SET device = device' : 'SET job = job'),
-          ),
-        ).rejects.toThrow('append-only');
-    await client.end();
-    for (const table of ['entry', 'entry_set_aside', 'pack', 'device_key'])
-      await expect(server.services.database.query(`DELETE FROM ${table}`)).rejects.toThrow(
-        'permission denied',
-      );
   });
 });

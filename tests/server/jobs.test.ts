@@ -1,59 +1,31 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { v7 } from 'uuid';
-import { jobPreview, jobsPage, jobStateView, jobView, packList } from '../../shared/api/jobs';
-import { packIntegrity } from '../../src/offline/packIntegrity';
-import type { Panel } from '../../shared/panel/panelSchema';
+import { jobPreview, jobView } from '../../shared/api/jobs';
 import { healthyPanel } from '../../server/commands/demo/panels/healthy';
-import { seedPerson, seedSite, signIn, type Agent } from '../support/seedPeople';
-import { issueDraft, issuePanel, jobRequestFor, sendJob } from '../support/seedJobs';
-import { enrolDevice, SignedLog, type SigningDevice } from '../support/signingDevice';
-import { testServices, type TestServer } from '../support/testServices';
+import { firstOf, issueDraft, jobRequestFor, packOf, sendJob } from '../support/seedJobs';
+import type { Agent } from '../support/seedPeople';
+import { seedWorks, worksPoints, type Works } from '../support/seedWorks';
+import { SignedLog } from '../support/signingDevice';
+import type { TestServer } from '../support/testServices';
 
+let works: Works;
 let server: TestServer;
-let site: string;
 let engineer: Agent;
 let foreman: Agent;
 let electrician: Agent;
-let outsider: Agent;
 let safety: Agent;
 let stranger: Agent;
-let ada: { id: string };
-let lead: { id: string };
-let other: { id: string };
-let device: SigningDevice;
 let panel: string;
 
 beforeAll(async () => {
-  server = await testServices();
-  site = await seedSite(server.services, 'Halden Quay');
-  const otherSite = await seedSite(server.services, 'Elsewhere');
-  await seedPerson(server.services, 'Pia Panel', [{ site, role: 'panel-engineer' }]);
-  lead = await seedPerson(server.services, 'Finn Foreman', [
-    { site, role: 'foreman' },
-    { site, role: 'electrician' },
-  ]);
-  ada = await seedPerson(server.services, 'Ada Electrician', [{ site, role: 'electrician' }]);
-  await seedPerson(server.services, 'Cy Electrician', [{ site, role: 'electrician' }]);
-  await seedPerson(server.services, 'Sue Safety', [{ site, role: 'safety-officer' }]);
-  other = await seedPerson(server.services, 'Otto Other', [
-    { site: otherSite, role: 'foreman' },
-    { site: otherSite, role: 'electrician' },
-  ]);
-  engineer = await signIn(server.app, 'pia.panel@example.org');
-  foreman = await signIn(server.app, 'finn.foreman@example.org');
-  electrician = await signIn(server.app, 'ada.electrician@example.org');
-  outsider = await signIn(server.app, 'cy.electrician@example.org');
-  safety = await signIn(server.app, 'sue.safety@example.org');
-  stranger = await signIn(server.app, 'otto.other@example.org');
-  device = await enrolDevice(electrician);
-  panel = await issuePanel(engineer, site, healthyPanel);
+  works = await seedWorks();
+  ({ server, engineer, foreman, electrician, safety, stranger, panel } = works);
 });
 afterAll(() => server.close());
 
-const points = healthyPanel.points.slice(0, 3).map(({ address }) => address);
-const crew = () => ({ electricians: [ada.id], foreman: lead.id });
+const points = worksPoints;
 const requestBody = (over: object = {}) =>
-  jobRequestFor(foreman, panel, points, crew()).then((body) => ({ ...body, ...over }));
+  jobRequestFor(foreman, panel, points, works.crew).then((body) => ({ ...body, ...over }));
 const view = async (job: string) => jobView.parse((await foreman.get(`/api/jobs/${job}`).expect(200)).body);
 const mails = (kind: string, panelTag = healthyPanel.tag) =>
   server.services.database.query<{ to: string; path: string; number: string }[]>(
@@ -61,9 +33,12 @@ const mails = (kind: string, panelTag = healthyPanel.tag) =>
      WHERE data->>'kind' = $1 AND data->'params'->>'panel' = $2`,
     [kind, panelTag],
   );
-let made = 0;
-const anotherPanel = (change: (panel: Panel) => Panel = (same) => same): Promise<string> =>
-  issuePanel(engineer, site, change({ ...structuredClone(healthyPanel), tag: `JB-${(made += 1)}` }));
+async function sendJobOf(ofPanel: string, revision: number) {
+  const body = await jobRequestFor(foreman, ofPanel, points, works.crew, revision);
+  await foreman.post('/api/jobs').send(body).expect(201);
+  await foreman.post(`/api/jobs/${body.id}/send`).expect(200);
+  return { job: body.id, pack: await packOf(electrician, body.id) };
+}
 
 describe('the preview', () => {
   it('answers plan, findings, checks and the size of the checklist', async () => {
@@ -90,7 +65,7 @@ describe('the preview', () => {
   });
 
   it('blocks points without a plan', async () => {
-    const unfed = await anotherPanel((one) => ({
+    const unfed = await works.anotherPanel((one) => ({
       ...one,
       isolators: one.isolators.map((isolator) => ({ ...isolator, suitableForIsolation: false })),
     }));
@@ -106,7 +81,7 @@ describe('the preview', () => {
   });
 
   it('locks what the last revision still had: a feed deleted on paper stays in the cabinet', async () => {
-    const twoFeeds = await anotherPanel((one) => ({
+    const twoFeeds = await works.anotherPanel((one) => ({
       ...one,
       sources: [
         ...one.sources,
@@ -148,25 +123,6 @@ describe('the preview', () => {
   });
 });
 
-function firstOf<T>(items: readonly T[]): T {
-  const [first] = items;
-  if (first === undefined) throw new Error('there is none');
-  return first;
-}
-async function packOf(agent: Agent, job: string) {
-  const { packs } = packList.parse((await agent.get('/api/my/packs').expect(200)).body);
-  const verdicts = packs.map(packIntegrity);
-  const found = verdicts.find((each) => each.ok && each.pack.job.id === job);
-  if (!found?.ok) throw new Error(`no whole pack of job ${job}`);
-  return found.pack;
-}
-async function sendJobOf(ofPanel: string, revision: number) {
-  const body = await jobRequestFor(foreman, ofPanel, points, crew(), revision);
-  await foreman.post('/api/jobs').send(body).expect(201);
-  await foreman.post(`/api/jobs/${body.id}/send`).expect(200);
-  return { job: body.id, pack: await packOf(electrician, body.id) };
-}
-
 describe('planning a job', () => {
   it('numbers it in its site and shows it as planned', async () => {
     const body = await requestBody({ words: 'Key is at the gate' });
@@ -178,8 +134,8 @@ describe('planning a job', () => {
       words: 'Key is at the gate',
       due: '2099-12-04',
       pack: null,
-      electricians: [{ id: ada.id, name: 'Ada Electrician' }],
-      foreman: { id: lead.id, name: 'Finn Foreman' },
+      electricians: [{ id: works.electricianId, name: 'Ada Electrician' }],
+      foreman: { id: works.foremanId, name: 'Finn Foreman' },
     });
     const second = (
       await foreman
@@ -214,13 +170,13 @@ describe('planning a job', () => {
   it.each([
     [
       'somebody who is no electrician of the site',
-      () => ({ electricians: [other.id] }),
+      () => ({ electricians: [works.strangerId] }),
       'not-fit',
       'electricians.0',
     ],
     ['somebody unknown', () => ({ electricians: [v7()] }), 'not-fit', 'electricians.0'],
-    ['a foreman of another site', () => ({ foreman: other.id }), 'not-fit', 'foreman'],
-    ['a foreman who works', () => ({ electricians: [lead.id] }), 'not-fit', 'foreman'],
+    ['a foreman of another site', () => ({ foreman: works.strangerId }), 'not-fit', 'foreman'],
+    ['a foreman who works', () => ({ electricians: [works.foremanId] }), 'not-fit', 'foreman'],
     ['no point', () => ({ points: [] }), 'invalid', 'points'],
     ['a date that is none', () => ({ due: '2099-02-30' }), 'invalid', 'due'],
     ['an unknown key', () => ({ urgent: true }), 'invalid', 'urgent'],
@@ -261,7 +217,9 @@ describe('sending a job', () => {
     const pack = await packOf(electrician, body.id);
     expect(pack.digest).toBe(shown.pack);
     expect(pack.checklist.scope.toSorted()).toEqual(points.toSorted());
-    expect(pack.people.find(({ id }) => id === ada.id)?.keys.map(({ key }) => key)).toContain(device.key);
+    expect(pack.people.find(({ id }) => id === works.electricianId)?.keys.map(({ key }) => key)).toContain(
+      works.device.key,
+    );
     const given = (await mails('job-given')).slice(before);
     expect(given).toEqual([
       { to: 'ada.electrician@example.org', path: `/my/jobs/${body.id}`, number: shown.number },
@@ -284,98 +242,9 @@ describe('sending a job', () => {
   });
 });
 
-describe('the packs of a person', () => {
-  it('leave out what the device has, and what is not theirs', async () => {
-    const { job, pack } = await sendJobOf(panel, 1);
-    const answer = (await electrician.get(`/api/my/packs?have=${pack.digest}`).expect(200)).body;
-    expect(answer.packs.map((each: { digest: string }) => each.digest)).not.toContain(pack.digest);
-    expect(answer.current).toContainEqual({ job, digest: pack.digest, status: 'sent' });
-    const theirs = (await outsider.get('/api/my/packs').expect(200)).body;
-    expect(theirs).toEqual({ packs: [], current: [] });
-    expect(await packOf(foreman, job)).toEqual(pack);
-  });
-
-  it('refuse a list of what is no digest', async () => {
-    await electrician.get('/api/my/packs?have=abc').expect(422);
-  });
-});
-
-describe('the board', () => {
-  it('shows foremen all of the site, electricians their own, strangers nothing', async () => {
-    const { job } = await sendJob(foreman, panel, points, crew());
-    const ids = async (agent: Agent) =>
-      jobsPage.parse((await agent.get('/api/jobs?limit=200').expect(200)).body).items.map(({ id }) => id);
-    expect(await ids(foreman)).toContain(job);
-    expect(await ids(safety)).toContain(job);
-    expect(await ids(electrician)).toContain(job);
-    expect(await ids(outsider)).toEqual([]);
-    expect(await ids(stranger)).toEqual([]);
-  });
-
-  it('pages without losing or doubling one', async () => {
-    const all = (await foreman.get('/api/jobs?limit=200').expect(200)).body.items;
-    const seen: unknown[] = [];
-    let after = '';
-    for (;;) {
-      const page = (await foreman.get(`/api/jobs?limit=3${after}`).expect(200)).body;
-      seen.push(...page.items);
-      if (page.next === null) break;
-      after = `&after=${encodeURIComponent(page.next)}`;
-    }
-    expect(seen).toEqual(all);
-    expect(all.length).toBeGreaterThan(3);
-  });
-
-  it('says when a job is late and lists it under what waits', async () => {
-    const body = await requestBody({ due: '2020-01-01' });
-    await foreman.post('/api/jobs').send(body).expect(201);
-    const page = jobsPage.parse((await foreman.get('/api/jobs?waiting=me&limit=200').expect(200)).body);
-    const mine = page.items.find(({ id }) => id === body.id);
-    expect(mine?.waiting).toEqual([{ what: 'late', count: 1, since: '2020-01-02T00:00:00.000Z' }]);
-    expect(page.items.every(({ waiting }) => waiting.length > 0)).toBe(true);
-  });
-
-  it('knows when a newer revision was issued', async () => {
-    const own = await anotherPanel();
-    const { job } = await sendJob(foreman, own, points, crew());
-    expect((await view(job)).newerRevision).toBe(false);
-    const { draft } = (await engineer.get(`/api/panels/${own}`)).body;
-    await engineer
-      .put(`/api/panels/${own}/draft`)
-      .send({ version: 1, panel: { ...draft.panel, name: 'Newer' } })
-      .expect(200);
-    await issueDraft(engineer, own, 2);
-    expect(await view(job)).toMatchObject({ newerRevision: true, revision: 1, panelName: healthyPanel.name });
-  });
-});
-
-describe('the folded state', () => {
-  it('says each step in the language of the screen, and what was answered', async () => {
-    const { job, pack } = await sendJob(foreman, panel, points, crew());
-    const log = new SignedLog(device, job, pack);
-    log.add({ kind: 'accepted', body: {} });
-    await foreman.post(`/api/jobs/${job}/entries`).send(log.push()).expect(200);
-    const state = (language: string) =>
-      foreman.get(`/api/jobs/${job}/state`).set('accept-language', language).expect(200);
-    const english = jobStateView.parse((await state('en')).body);
-    const spanish = jobStateView.parse((await state('es')).body);
-    expect(english.steps.map(({ id }) => id)).toEqual(spanish.steps.map(({ id }) => id));
-    expect(english.steps[0]?.title).not.toBe(spanish.steps[0]?.title);
-    expect(english.stages.map(({ stage }) => stage)[0]).toBe('get-ready');
-    await outsider.get(`/api/jobs/${job}/state`).expect(404);
-    await stranger.get(`/api/jobs/${job}/state`).expect(404);
-  });
-
-  it('is not there while the job is only planned', async () => {
-    const body = await requestBody();
-    await foreman.post('/api/jobs').send(body).expect(201);
-    await foreman.get(`/api/jobs/${body.id}/state`).expect(404);
-  });
-});
-
 describe('cancelling a job', () => {
   it('ends it with words, once', async () => {
-    const { job } = await sendJob(foreman, panel, points, crew());
+    const { job } = await sendJob(foreman, panel, points, works.crew);
     await foreman.post(`/api/jobs/${job}/cancel`).send({ words: 'Pump stays in use' }).expect(200);
     await foreman.post(`/api/jobs/${job}/cancel`).send({ words: 'Pump stays in use' }).expect(200);
     expect(await view(job)).toMatchObject({
@@ -388,9 +257,9 @@ describe('cancelling a job', () => {
   });
 
   it('is refused while a lock is on', async () => {
-    const { job, pack } = await sendJob(foreman, panel, points, crew());
+    const { job, pack } = await sendJob(foreman, panel, points, works.crew);
     const { checklist } = await packOf(electrician, job);
-    const log = new SignedLog(device, job, pack);
+    const log = new SignedLog(works.device, job, pack);
     log.add({ kind: 'accepted', body: {} });
     log.add({ kind: 'lock-on', body: { isolator: firstOf(checklist.isolators), lock: '17' } });
     await foreman.post(`/api/jobs/${job}/entries`).send(log.push()).expect(200);
@@ -404,12 +273,12 @@ describe('cancelling a job', () => {
     ['empty words', { words: '  ' }],
     ['an unknown key', { words: 'So', force: true }],
   ])('is refused with %s', async (_name, body) => {
-    const { job } = await sendJob(foreman, panel, points, crew());
+    const { job } = await sendJob(foreman, panel, points, works.crew);
     await foreman.post(`/api/jobs/${job}/cancel`).send(body).expect(422);
   });
 
   it('is for foremen of the site', async () => {
-    const { job } = await sendJob(foreman, panel, points, crew());
+    const { job } = await sendJob(foreman, panel, points, works.crew);
     await electrician.post(`/api/jobs/${job}/cancel`).send({ words: 'No' }).expect(403);
     await stranger.post(`/api/jobs/${job}/cancel`).send({ words: 'No' }).expect(404);
   });

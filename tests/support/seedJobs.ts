@@ -1,8 +1,9 @@
 /** Panels, revisions and jobs made through the API, as the office makes them. */
 import { v7 } from 'uuid';
-import type { JobPreview, JobRequest } from '../../shared/api/jobs';
+import { packList, type JobPreview, type JobRequest, type Pack } from '../../shared/api/jobs';
 import type { Acceptance, FindingsAnswer } from '../../shared/api/panels';
 import type { Panel } from '../../shared/panel/panelSchema';
+import { packIntegrity } from '../../src/offline/packIntegrity';
 import type { Agent } from './seedPeople';
 
 type Found = FindingsAnswer['findings'][number];
@@ -65,4 +66,18 @@ export async function sendJob(
   await foreman.post('/api/jobs').send(body).expect(201);
   const sent = await foreman.post(`/api/jobs/${body.id}/send`).expect(200);
   return { job: body.id, pack: (sent.body as { pack: string }).pack };
+}
+
+/** The whole pack of a job as this person's phone gets it. */
+export async function packOf(agent: Agent, job: string): Promise<Pack> {
+  const { packs } = packList.parse((await agent.get('/api/my/packs').expect(200)).body);
+  const found = packs.map(packIntegrity).find((each) => each.ok && each.pack.job.id === job);
+  if (!found?.ok) throw new Error(`no whole pack of job ${job}`);
+  return found.pack;
+}
+
+export function firstOf<T>(items: readonly T[]): T {
+  const [first] = items;
+  if (first === undefined) throw new Error('there is none');
+  return first;
 }

@@ -27,8 +27,8 @@ interface ListQuery {
   limit: number;
 }
 
-/** PostgreSQL's code for a unique constraint; here only (site, tag) can be broken. */
-function isTagTaken(error: unknown): boolean {
+/** PostgreSQL's code for a broken unique constraint: an id, or a tag on a site. */
+function isTaken(error: unknown): boolean {
   if (!(error instanceof QueryFailedError)) return false;
   const thrown: unknown = error.driverError;
   return typeof thrown === 'object' && thrown !== null && 'code' in thrown && thrown.code === '23505';
@@ -38,7 +38,7 @@ async function orTagTaken<T>(work: Promise<T>): Promise<T> {
   try {
     return await work;
   } catch (error) {
-    throw isTagTaken(error) ? new Refused(409, 'tag-taken') : error;
+    throw isTaken(error) ? new Refused(409, 'tag-taken') : error;
   }
 }
 
@@ -60,37 +60,46 @@ export class PanelsService {
   ) {}
 
   /** Takes a panel file in as a new panel. The same id with the same file is the same upload, answered the same way. */
-  upload(actor: Actor, { id, site, panel }: Upload): Promise<PanelRow> {
+  async upload(actor: Actor, { id, site, panel }: Upload): Promise<PanelRow> {
     if (!holds(actor, site, ...panelEditors)) throw notFound();
     const digest = digestOf(panel);
-    return orTagTaken(
-      this.database.transaction(async (tx) => {
-        const known = await tx.findOneBy(PanelEntity, { id });
-        if (known) return this.uploadedBefore(tx, known, site, digest);
-        const draft = draftOf(panel, digest, actor.person);
-        await tx.insert(PanelEntity, {
-          id,
-          site,
-          ...draft,
-          uploadDigest: digest,
-          revision: null,
-          revisionDigest: null,
-        });
-        const about = { panel: id, tag: panel.tag, digest };
-        await writeAudit(tx, { actor: actor.person, site, act: 'panel-uploaded', about });
-        return panelRow(await tx.findOneByOrFail(PanelEntity, { id }), 0);
-      }),
-    );
+    const before = () => this.uploadedBefore(id, site, digest);
+    const known = await before();
+    if (known) return known;
+    try {
+      return await this.insert(actor, { id, site, panel }, digest);
+    } catch (error) {
+      if (!isTaken(error)) throw error;
+      // Sent twice at the same moment, the other one was first.
+      const first = await before();
+      if (first) return first;
+      throw new Refused(409, 'tag-taken');
+    }
   }
 
-  private async uploadedBefore(
-    tx: EntityManager,
-    known: PanelEntity,
-    site: string,
-    digest: string,
-  ): Promise<PanelRow> {
+  private insert(actor: Actor, { id, site, panel }: Upload, digest: string): Promise<PanelRow> {
+    return this.database.transaction(async (tx) => {
+      const draft = draftOf(panel, digest, actor.person);
+      await tx.insert(PanelEntity, {
+        id,
+        site,
+        ...draft,
+        uploadDigest: digest,
+        revision: null,
+        revisionDigest: null,
+      });
+      const about = { panel: id, tag: panel.tag, digest };
+      await writeAudit(tx, { actor: actor.person, site, act: 'panel-uploaded', about });
+      return panelRow(await tx.findOneByOrFail(PanelEntity, { id }), 0);
+    });
+  }
+
+  private async uploadedBefore(id: string, site: string, digest: string): Promise<PanelRow | null> {
+    const tx = this.database.manager;
+    const known = await tx.findOneBy(PanelEntity, { id });
+    if (!known) return null;
     if (known.site !== site || known.uploadDigest !== digest) throw new Refused(409, 'id-taken');
-    return panelRow(known, (await openJobsOf(tx, [known.id])).get(known.id) ?? 0);
+    return panelRow(known, (await openJobsOf(tx, [id])).get(id) ?? 0);
   }
 
   /** Puts a panel file in place of the draft. A save that was sent twice is answered as once. */
