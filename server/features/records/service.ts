@@ -28,6 +28,9 @@ interface SealParts {
   now?: () => Date;
 }
 
+/** A record's row as plain values. */
+type SealedRow = Pick<RecordEntity, keyof RecordEntity>;
+
 const nothingNew: SealOutcome = { sealed: false, reasons: [] };
 
 export class SealingService {
@@ -62,7 +65,7 @@ export class SealingService {
     return { sealed: true, record: record.id, number: record.number };
   }
 
-  private async write(tx: EntityManager, taken: Taken, amends: RecordEntity | null): Promise<RecordEntity> {
+  private async write(tx: EntityManager, taken: Taken, amends: RecordEntity | null): Promise<SealedRow> {
     const { job, folded } = taken;
     const chain = await this.takeChain(tx, job.site);
     const document = recordDocumentOf({
@@ -103,7 +106,7 @@ export class SealingService {
     document: RecordDocument,
     chain: RecordChainEntity,
     amends: RecordEntity | null,
-  ): RecordEntity {
+  ): SealedRow {
     const content = canonicalJson(document);
     const digest = sha256Of(content);
     const named = (part: 'electrician' | 'foreman') =>
@@ -144,7 +147,7 @@ export class SealingService {
   }
 
   /** Number and seal leave the database with this mail: a chain cut at its end is noticed by whoever kept it. */
-  private async tell(tx: EntityManager, job: SealableJob, record: RecordEntity): Promise<void> {
+  private async tell(tx: EntityManager, job: SealableJob, record: SealedRow): Promise<void> {
     const officers = await this.parts.people.contactsWithRole(tx, job.site, 'safety-officer');
     const foreman = await this.parts.people.contacts(tx, [job.foreman]);
     const to = [...officers, ...foreman.filter(({ id }) => !officers.some((each) => each.id === id))];

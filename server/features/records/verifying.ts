@@ -79,14 +79,14 @@ export async function chainOf(
   site: string,
 ): Promise<{ links: Link[]; end: ChainEnd | undefined }> {
   // One statement, so that a record sealed in this moment is in both or in neither.
-  const rows = await database.query<(Link & ChainEnd)[]>(
+  const rows = await database.query<(ChainEnd & (Link | { number: null }))[]>(
     `SELECT r.number, r.digest, r.previous_seal AS "previousSeal", r.seal,
        c.last_number AS "lastNumber", c.last_seal AS "lastSeal"
      FROM record_chain c LEFT JOIN record r ON r.site = c.site WHERE c.site = $1 ORDER BY r.number`,
     [site],
   );
   const [end] = rows;
-  return { links: rows.filter(({ number }) => number !== null), end };
+  return { links: rows.filter((row): row is ChainEnd & Link => row.number !== null), end };
 }
 
 /** The chain's own row names the newest record: a tail that was cut off shows. */

@@ -115,7 +115,9 @@ function flow(address: string): 'to module' | 'to field' | 'none' {
   if (!block || block.kind !== 'rect' || !facts) throw new Error('no terminal block');
   const arrow = drawn.shapes.find(
     (each) =>
-      each.kind === 'polygon' && each.corners[0]?.[1] === block.y + 17 && (each.corners[0]?.[0] ?? 0) > 132,
+      each.kind === 'polygon' &&
+      each.corners[0]?.[1] === block.y + 17 &&
+      each.corners.every(([x]) => x > 132),
   );
   if (!arrow || arrow.kind !== 'polygon') return 'none';
   const [tip, foot] = arrow.corners;

@@ -1,11 +1,12 @@
 /** What was done and read at each point, with the loop of a point that has an exception; then the steps of no point. */
+import { setImmediate } from 'node:timers/promises';
 import type { RecordDocument } from '../../../../shared/api/recordDocument';
 import { loopDiagram } from '../../../../shared/diagram/loopDiagram';
 import { loopWords } from '../../../../shared/diagram/loopWords';
 import { drawShapes } from './drawShapes';
 import { muted } from './pen';
 import type { Printing } from './printed';
-import { margin, type Sheet } from './sheet';
+import { margin } from './sheet';
 import { Table, type Column } from './table';
 
 type Point = RecordDocument['points'][number];
@@ -81,10 +82,16 @@ export const rowCount = ({ points, steps, deadTests, lockOut }: RecordDocument):
   deadTests.length +
   lockOut.length;
 
-export function pointsSection(printing: Printing): void {
+/** So many points are written before other requests get their turn: about 50 ms. */
+const pointsAtOnce = 10;
+
+export async function pointsSection(printing: Printing): Promise<void> {
   const { sheet, words, document } = printing;
   sheet.heading(words.t('office.points'), 2);
-  for (const each of document.points) point(printing, each);
+  for (const [index, each] of document.points.entries()) {
+    if (index % pointsAtOnce === 0) await setImmediate();
+    point(printing, each);
+  }
   sheet.heading(words.t('records.otherSteps', { n: document.steps.length }), 2);
   answers(printing, document.steps);
 }
@@ -97,5 +104,3 @@ export const photosSection = ({ sheet, words: { t, at }, document }: Printing): 
       size: 8,
     });
 };
-
-export type { Sheet };

@@ -11,7 +11,7 @@ import { margin, Sheet } from './sheet';
 import { deadTestSection, lockOutSection } from './tablesSection';
 import { titleBlocks } from './titleBlocks';
 
-const sections = [
+const sections: readonly ((printing: Printing) => void | Promise<void>)[] = [
   headSection,
   exceptionsSection,
   lockOutSection,
@@ -33,7 +33,7 @@ function bytesOf(pdf: Pdf): Promise<Buffer> {
   });
 }
 
-export function recordPdf(record: RecordToPrint): Promise<Buffer> {
+export async function recordPdf(record: RecordToPrint): Promise<Buffer> {
   const { document, number, digest, sealedAt } = record;
   const words = recordWords(document);
   const pdf = new PDFDocument({
@@ -59,6 +59,6 @@ export function recordPdf(record: RecordToPrint): Promise<Buffer> {
   });
   const sheet = new Sheet(new Pen(pdf), rowCount(document));
   const printing: Printing = { ...record, sheet, words };
-  for (const section of sections) section(printing);
+  for (const section of sections) await section(printing);
   return bytesOf(pdf);
 }
