@@ -1,6 +1,8 @@
 import type { ComponentType } from 'react';
 import type { RouteObject } from 'react-router-dom';
 import type { Role } from '../../shared/api/common';
+import { chosenLanguage } from '../components/wording/chosenLanguage';
+import { holdArea } from '../components/wording/held';
 import { paths } from './paths';
 
 type Load = () => Promise<ComponentType>;
@@ -10,7 +12,11 @@ function page(path: string, load: Load, ...roles: Role[]): RouteObject {
   return {
     path,
     lazy: async () => {
-      const [Page, { ForRoles }] = await Promise.all([load(), import('./ForRoles')]);
+      const [Page, { ForRoles }] = await Promise.all([
+        load(),
+        import('./ForRoles'),
+        holdArea('desk', chosenLanguage()),
+      ]);
       if (roles.length === 0) return { Component: Page };
       return {
         Component: () => (

@@ -2,7 +2,9 @@
 import { createContext, useContext, useEffect, useMemo, useState, type ReactNode } from 'react';
 import type { Language } from '../../shared/api/common';
 import type { Text } from '../../shared/panel/says';
-import { render, type WordingKey } from '../../shared/wording/render';
+import type { WordingKey } from '../../shared/wording/render';
+import { chosenLanguage, keepLanguage } from './wording/chosenLanguage';
+import { holdLanguage, renderHeld } from './wording/held';
 
 interface Words {
   language: Language;
@@ -14,30 +16,43 @@ interface Words {
 }
 
 const WordsContext = createContext<Words | null>(null);
-const storageKey = 'coldloop.language';
 
-function startLanguage(): Language {
-  const kept = localStorage.getItem(storageKey);
-  if (kept === 'en' || kept === 'es') return kept;
-  return navigator.language.startsWith('es') ? 'es' : 'en';
-}
-
+/** Shows nothing until the messages are there; a language is changed to only when its messages are. */
 export function WordsProvider({ children }: { children: ReactNode }) {
-  const [language, setLanguage] = useState<Language>(startLanguage);
+  const [wanted, setLanguage] = useState(chosenLanguage);
+  const [language, setShown] = useState<Language>();
   useEffect(() => {
-    document.documentElement.lang = language;
-    localStorage.setItem(storageKey, language);
-  }, [language]);
-  const words = useMemo<Words>(
-    () => ({
-      language,
-      setLanguage,
-      t: (key, params) => render(language, params ? { key, params } : { key }),
-      say: (text, carried) => render(language, text, carried),
-    }),
+    let isOver = false;
+    holdLanguage(wanted).then(
+      () => {
+        if (isOver) return;
+        document.documentElement.lang = wanted;
+        keepLanguage(wanted);
+        setShown(wanted);
+      },
+      (fault: unknown) => {
+        setShown(() => {
+          throw fault;
+        });
+      },
+    );
+    return () => {
+      isOver = true;
+    };
+  }, [wanted]);
+  const words = useMemo<Words | null>(
+    () =>
+      language
+        ? {
+            language,
+            setLanguage,
+            t: (key, params) => renderHeld(language, params ? { key, params } : { key }),
+            say: (text, carried) => renderHeld(language, text, carried),
+          }
+        : null,
     [language],
   );
-  return <WordsContext.Provider value={words}>{children}</WordsContext.Provider>;
+  return words && <WordsContext.Provider value={words}>{children}</WordsContext.Provider>;
 }
 
 export function useWords(): Words {

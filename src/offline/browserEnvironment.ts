@@ -4,6 +4,8 @@ import { deviceName } from './deviceName';
 import type { BrowserStorage, Channel, DeviceEnvironment } from './environment';
 import { lockedRound } from './lockedRound';
 
+type ScreenWords = Pick<DeviceEnvironment, 'language' | 'say'>;
+
 function openChannel(name: string): Channel {
   const channel = new BroadcastChannel(name);
   return {
@@ -45,7 +47,7 @@ const storage: BrowserStorage = {
 };
 
 /** Only where `offlineSupport` says ok. */
-export function browserEnvironment(): DeviceEnvironment {
+export function browserEnvironment({ language, say }: ScreenWords): DeviceEnvironment {
   const monotonic = () => performance.now();
   return {
     now: () => Date.now(),
@@ -65,7 +67,8 @@ export function browserEnvironment(): DeviceEnvironment {
     openChannel,
     onWake,
     isVisible: () => document.visibilityState === 'visible',
-    language: () => (document.documentElement.lang === 'es' ? 'es' : 'en'),
+    language,
+    say,
     storage,
     shell: browserShell,
     deviceName: () => deviceName(navigator.userAgent),

@@ -1,5 +1,6 @@
 /** The outside world as the device store meets it, so that tests and the simulation can bring their own. */
 import type { Language } from '../../shared/api/common';
+import type { Text } from '../../shared/panel/says';
 
 export interface Channel {
   post(message: string): void;
@@ -44,6 +45,8 @@ export interface DeviceEnvironment {
   isVisible(): boolean;
   /** Language of the screen, for what the server says. */
   language(): Language;
+  /** A sentence in that language. */
+  say(text: Text): string;
   storage: BrowserStorage;
   shell: Shell;
   /** What the person reads in the list of their devices, e.g. "Chrome on Android". */

@@ -1,7 +1,6 @@
 /** Sends one log's unsent entries of one job until none is left, the server refuses, or nobody answers. */
 import { entriesAnswer, headsProblem } from '../../shared/api/jobs';
 import type { Entry } from '../../shared/job/entry';
-import { render } from '../../shared/wording/render';
 import { acknowledge } from './acknowledge';
 import { batch, maxBatchEntries } from './batch';
 import type { Databases } from './databases';
@@ -29,8 +28,6 @@ type Next = { go: Progress } | { end: RoundOutcome };
 type Acknowledged = { id: string; setAside: boolean }[];
 type Refusal = Extract<ServerAnswer<unknown>, { kind: 'refused' }>;
 
-const asideWords = ({ env }: PushContext): string => render(env.language(), { key: 'device.store.setAside' });
-
 async function attend({ env, databases }: PushContext, entry: Entry, says: string): Promise<void> {
   const row = { entry: entry.id, job: entry.job, says, at: new Date(env.now()).toISOString() };
   await databases.outbox.run((database) => database.put('attention', row));
@@ -50,7 +47,8 @@ async function afterSuccess(
   // An answer that acknowledges nothing we sent would be asked for ever.
   if (!first) return { end: { end: 'refused', says: { key: 'device.store.error.not-acknowledged' } } };
   await acknowledge(context.databases, first.entry.job, held);
-  for (const { entry, setAside } of held) if (setAside) await attend(context, entry, asideWords(context));
+  for (const { entry, setAside } of held)
+    if (setAside) await attend(context, entry, context.env.say({ key: 'device.store.setAside' }));
   await rememberSent(context.databases, new Date(context.env.now()).toISOString());
   await context.changed();
   const queue = progress.queue.filter(({ id }) => !answers.has(id));

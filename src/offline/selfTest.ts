@@ -1,17 +1,18 @@
 /** Opens a job as a cold start without a network does, and remembers for which files and pack that was seen. */
 import type { Pack } from '../../shared/api/jobs';
 import { textsOf } from '../../shared/checklist/textsOf';
-import { render } from '../../shared/wording/render';
+import { foldJob } from '../../shared/job/fold';
+import { renderWith } from '../../shared/wording/renderWith';
 import type { Databases } from './databases';
 import type { DeviceEnvironment } from './environment';
 import { localJob } from './localJobs';
 import { packIntegrity } from './packIntegrity';
 
-/** Every sentence of every step in both languages; throws when one cannot be said. */
+/** Every sentence of every step in both languages, from what the pack carries alone; throws when one cannot be said. */
 function readAll({ checklist, wording }: Pack): void {
   for (const step of checklist.steps)
     for (const text of textsOf(step))
-      for (const language of ['en', 'es'] as const) render(language, text, wording[language]);
+      for (const language of ['en', 'es'] as const) renderWith([wording[language]], language, text);
 }
 
 type Opened = { pack: string } | { fault: string };
@@ -22,6 +23,7 @@ async function open(env: DeviceEnvironment, databases: Databases, job: string): 
   const local = await localJob(databases, job);
   if (!local || !packIntegrity(local.pack).ok) return { fault: 'device.store.ready.test.pack' };
   readAll(local.pack);
+  foldJob(local.pack.checklist, local.entries, local.facts);
   return { pack: local.pack.digest };
 }
 

@@ -13,7 +13,8 @@ function placeholders(message: string): string[] {
   const walk = (elements: Elements) => {
     for (const element of elements) {
       // Type 0 is plain text; the # of a plural has no value: neither names an argument.
-      if (Number(element.type) !== 0 && 'value' in element) names.add(element.value);
+      const type: number = element.type;
+      if (type !== 0 && 'value' in element) names.add(element.value);
       if ('options' in element) for (const option of Object.values(element.options)) walk(option.value);
     }
   };

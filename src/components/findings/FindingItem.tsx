@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import type { FindingView } from '../../../shared/api/panels';
-import { formatNumber } from '../../../shared/wording/render';
+import { formatNumber } from '../../../shared/wording/renderWith';
 import { useWords } from '../words';
 import { HarmMark } from './HarmMark';
 import { SumTable } from './SumTable';

@@ -1,5 +1,5 @@
 import type { PanelCheck } from '../../../shared/api/panels';
-import { formatNumber } from '../../../shared/wording/render';
+import { formatNumber } from '../../../shared/wording/renderWith';
 import { SignalBox } from '../SignalBox';
 import { Tag } from '../Tag';
 import { useWords } from '../words';

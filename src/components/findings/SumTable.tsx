@@ -1,5 +1,6 @@
 import type { FindingView } from '../../../shared/api/panels';
-import { formatNumber, messageOf } from '../../../shared/wording/render';
+import { formatNumber } from '../../../shared/wording/renderWith';
+import { heldMessage } from '../wording/held';
 import { useWords } from '../words';
 
 /** The sum behind a finding, line by line: what, how much, where the number is from. */
@@ -25,7 +26,7 @@ export function SumTable({ because }: { because: FindingView['because'] }) {
       <tbody>
         {because.map((quantity, index) => (
           <tr key={index} className="border-b border-rule">
-            <td className="py-0.5 pr-3">{messageOf(language, quantity.name) ?? quantity.name}</td>
+            <td className="py-0.5 pr-3">{heldMessage(language, quantity.name) ?? quantity.name}</td>
             <td className="py-0.5 pr-3 text-right font-mono whitespace-nowrap">
               {formatNumber(quantity.value)} {quantity.unit}
             </td>

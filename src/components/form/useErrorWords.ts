@@ -1,4 +1,5 @@
-import { messageOf, type WordingKey } from '../../../shared/wording/render';
+import type { WordingKey } from '../../../shared/wording/render';
+import { heldMessage } from '../wording/held';
 import { useWords } from '../words';
 
 /** Turns a field's error into words: form schemas give wording keys as messages, the server gives sentences. */
@@ -7,7 +8,7 @@ export function useErrorWords(): (error: { message?: string | undefined } | unde
   return (error) => {
     if (!error) return undefined;
     const message = error.message ?? '';
-    return messageOf(language, message) === undefined
+    return heldMessage(language, message) === undefined
       ? message || t('app.required')
       : t(message as WordingKey);
   };

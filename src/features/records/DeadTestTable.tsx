@@ -1,5 +1,5 @@
 import type { RecordDocument } from '../../../shared/api/recordDocument';
-import { formatNumber } from '../../../shared/wording/render';
+import { formatNumber } from '../../../shared/wording/renderWith';
 import { Moment } from '../../components/Moment';
 import { Table, type Column } from '../../components/Table';
 import { Tag } from '../../components/Tag';

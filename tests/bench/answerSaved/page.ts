@@ -29,7 +29,7 @@ async function timeOf(run: () => Promise<unknown>): Promise<number> {
 }
 
 async function measure(): Promise<AnswerSaved> {
-  const store = new LocalDeviceStore({ ...browserEnvironment(), fetch: basement });
+  const store = new LocalDeviceStore({ ...browserEnvironment({ language: () => 'en', say: ({ key }) => key }), fetch: basement });
   const me = { id: electrician.person, name: electrician.name, email: electrician.email };
   await store.enrol(me, '481516');
   await store.sendNow();

@@ -63,6 +63,7 @@ export class FakeDevice {
       },
       isVisible: () => this.visible,
       language: () => 'en',
+      say: ({ key }) => key,
       storage: {
         persist: () => {
           this.storage.asked += 1;

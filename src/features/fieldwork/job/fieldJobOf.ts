@@ -1,8 +1,9 @@
 import type { Language } from '../../../../shared/api/common';
 import type { Text } from '../../../../shared/panel/says';
-import { render } from '../../../../shared/wording/render';
+
 import type { Here } from '../../../components/field/here';
 import { markTags, withoutMarks } from '../../../components/field/tagMarks';
+import { renderHeld } from '../../../components/wording/held';
 import type { LocalJob } from '../../../offline/types';
 import { folded } from './folded';
 import { panelTags } from './panelTags';
@@ -14,7 +15,7 @@ export function fieldJobOf(local: LocalJob, me: Here, language: Language): Field
   const tags = panelTags(pack.panel);
   const steps = new Map(pack.checklist.steps.map((step) => [step.id, step]));
   const marked = (text: Text) =>
-    render(
+    renderHeld(
       language,
       markTags(text, (word) => tags.has(word)),
       pack.wording[language],

@@ -1,5 +1,5 @@
 import type { ReadingAsk } from '../../../../shared/checklist/types';
-import { formatNumber } from '../../../../shared/wording/render';
+import { formatNumber } from '../../../../shared/wording/renderWith';
 import type { useWords } from '../../../components/words';
 
 type Say = ReturnType<typeof useWords>['t'];
