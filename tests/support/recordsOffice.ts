@@ -5,6 +5,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import request from 'supertest';
 import { healthyPanel } from '../../server/commands/demo/panels/healthy';
+import type { Config } from '../../server/config';
 import { page } from '../../shared/api/common';
 import type { Pack } from '../../shared/api/jobs';
 import { recordView, type RecordView } from '../../shared/api/recordDocument';
@@ -36,8 +37,8 @@ export class RecordsOffice {
 
   private constructor(readonly server: TestServer) {}
 
-  static async open(): Promise<RecordsOffice> {
-    const office = new RecordsOffice(await testServices());
+  static async open(overrides: Partial<Config> = {}): Promise<RecordsOffice> {
+    const office = new RecordsOffice(await testServices(overrides));
     const { services } = office.server;
     office.site = await seedSite(services, 'Halden Quay');
     const elsewhere = await seedSite(services, 'Elsewhere');
