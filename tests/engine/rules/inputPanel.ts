@@ -68,10 +68,14 @@ export const cable = (more: Partial<Cable> = {}): Cable => ({
   size: { mm2: 0.75 },
   lengthM: 30,
   conductor: 'class5',
+  cores: 2,
+  grouped: 1,
   pFperM: 120,
   insulationV: 300,
   ...more,
 });
+
+const signalCore = { role: 'signal', wire: 'W1', colour: 'BK', terminal: 'DI:1' } as const;
 
 export const inputPoint = (more: Partial<Point> = {}): Point => ({
   address: 'DI.01',
@@ -99,6 +103,7 @@ export const module = (io: ModuleIo, more: Partial<Module> = {}): Module => ({
   slot: '1',
   description: 'A module',
   terminals: ['DI:1', 'DI:C'],
+  terminalRange: { minMm2: 0.2, maxMm2: 2.5 },
   io,
   ...more,
 });
@@ -134,7 +139,7 @@ export const inputPanel = (
     supplies: [supply],
     modules: [module(io)],
     groups: [group({ common })],
-    points: [inputPoint(point)],
+    points: [inputPoint({ conductors: [signalCore], ...point })],
   });
 
 /** The first input of a panel as its rules see it. */

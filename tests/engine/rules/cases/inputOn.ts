@@ -123,7 +123,7 @@ export const onCases: Case[] = [
   {
     rule: 'input.never-on',
     name: 'spare and empty',
-    panel: noCable(inputPanel(bare, { spare: true })),
+    panel: noCable(inputPanel(bare, { spare: true, conductors: [] })),
     expected: 'nothing',
   },
   { rule: 'input.never-on', name: 'opto: 8.58 mA for 4', panel: inputPanel(opto), expected: 'ok' },
