@@ -209,7 +209,10 @@ export function walk(job: Job, person: JobPerson, until?: Stage, otherwise?: Oth
     const state = job.state();
     const step = nextStep(job.checklist, state, person.id);
     if (!step || stages.indexOf(step.stage) >= end) return;
-    if (step.ask.kind === 'close' && !state.clear.includes(person.id)) sayClear(job);
+    if (step.ask.kind === 'close' && !state.clear.includes(person.id)) {
+      sayClear(job);
+      continue;
+    }
     if (otherwise?.(step, job)) continue;
     if (!gateFor(job.checklist, state, person.id, step.id).open) return;
     answerWell(job, person, step);

@@ -66,7 +66,8 @@ const ownLocks: GateCheck = (facts) => {
 const ownTests: GateCheck = (facts) => {
   if (!facts.step.needsIsolation) return undefined;
   const { missingTests, missingLocks, holds } = facts.known.proofOf(facts.person);
-  return holds || missingLocks.length > 0 ? undefined : refuse('own-tests', { n: missingTests.length });
+  const isOther = missingLocks.length > 0 || facts.known.isolationOver;
+  return holds || isOther ? undefined : refuse('own-tests', { n: missingTests.length });
 };
 
 const ownTerminal: GateCheck = ({ known, step, person }) => {

@@ -1,6 +1,6 @@
 /** The order of stages and steps: which earlier step a step waits for. */
 import { stages, type Stage } from '../../checklist/types';
-import { stageNumber, type Lookup } from '../known/lookup';
+import { stageNumber } from '../known/lookup';
 import type { GateFacts } from './gateFacts';
 
 type Before = (facts: GateFacts, stage: Stage) => number | undefined;
@@ -55,17 +55,19 @@ const restoring = (facts: GateFacts): number | undefined => {
   return firstOf(facts, earlier);
 };
 
-const ofSamePoint = (lookup: Lookup, point: string | undefined) => (number: number) =>
-  point !== undefined && lookup.steps[number]?.where?.point === point;
-
-const withinPoint = (facts: GateFacts): number | undefined =>
-  firstOf(facts, earlierIn(facts).filter(ofSamePoint(facts.known.lookup, facts.step.where?.point)));
+const withinPoint = (facts: GateFacts): number | undefined => {
+  const { lookup } = facts.known;
+  const ofPoint = lookup.ofPoint.get(facts.step.where?.point ?? '') ?? [];
+  return firstOf(
+    facts,
+    ofPoint.filter((each) => each < facts.number && lookup.steps[each]?.stage === facts.step.stage),
+  );
+};
 
 /** Who is allowed, what is covered and every stop come before the first point. */
 const proving = (facts: GateFacts): number | undefined => {
-  const { lookup } = facts.known;
+  const panel = facts.known.lookup.ofPanel[stageNumber[facts.step.stage]] ?? [];
   if (facts.step.where?.point === undefined) return undefined;
-  const panel = earlierIn(facts).filter((number) => lookup.steps[number]?.where?.point === undefined);
   return firstOf(facts, panel, facts.person) ?? withinPoint(facts);
 };
 

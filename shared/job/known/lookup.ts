@@ -9,6 +9,8 @@ export interface Lookup {
   /** Steps of each stage, in order. */
   inStage: readonly (readonly number[])[];
   ofPoint: ReadonlyMap<string, readonly number[]>;
+  /** Steps of each stage that belong to no point. */
+  ofPanel: readonly (readonly number[])[];
   /** By isolator tag. */
   lockOn: ReadonlyMap<string, number>;
   lockOff: ReadonlyMap<string, number>;
@@ -55,6 +57,9 @@ function lookUp({ steps, isolators }: Checklist): Lookup {
     stageOf: steps.map(({ stage }) => stageNumber[stage]),
     inStage: stages.map((stage) => inStage.get(stage) ?? []),
     ofPoint: grouped(steps, ({ where }) => where?.point),
+    ofPanel: stages.map((stage) =>
+      (inStage.get(stage) ?? []).filter((index) => steps[index]?.where?.point === undefined),
+    ),
     lockOn: byIsolator(steps, 'lock-on'),
     lockOff: byIsolator(steps, 'lock-off'),
     close: byIsolator(steps, 'close'),

@@ -1,4 +1,5 @@
 /** What stands on a step in a view: worked out from what counts, never stored. */
+import { canonicalJson } from '../../panel/canonical';
 import { isProving } from '../known/proving';
 import { before } from '../order/placed';
 import type { StepStatus } from '../types';
@@ -24,7 +25,7 @@ function chosenOf(view: View, step: number, standing: readonly Answered[]): Answ
 }
 
 const sameValue = (a: Answered, b: Answered): boolean =>
-  JSON.stringify(a.value) === JSON.stringify(b.value) && a.verdict === b.verdict;
+  a.verdict === b.verdict && canonicalJson(a.value) === canonicalJson(b.value);
 
 const stands = (answer: Answered): Standing => ({
   status: answer.verdict === 'ok' ? 'done' : 'out',
