@@ -135,6 +135,23 @@ export const coil24 = (
   suppressed: false,
 });
 
+/** The coil of a contactor on AC: six times its holding current while it pulls in. */
+export const acCoil = (tag: string, location: string, V: number, A: number): DeviceOf<'load'> => ({
+  kind: 'load',
+  tag,
+  location,
+  load: 'coil',
+  V,
+  current: 'ac',
+  A,
+  inrushA: 6 * A,
+  inrushMs: 20,
+  pickUpPct: 85,
+  dropOutPct: 15,
+  polarised: false,
+  suppressed: false,
+});
+
 export const lamp24 = (tag: string, location: string): DeviceOf<'load'> => ({
   kind: 'load',
   tag,
@@ -212,7 +229,12 @@ export function outputPoint(
     group,
     conductors: [
       { role: 'signal', wire, colour: returns.signal, terminal: `${module}:${number}` },
-      { role: returns.role, wire: `${wire}R`, colour: returns.colour, terminal: returnTerminal(module, number) },
+      {
+        role: returns.role,
+        wire: `${wire}R`,
+        colour: returns.colour,
+        terminal: returnTerminal(module, number),
+      },
     ],
     device,
     cable: cable(`W-${module}-${number}`, lengthM, 2),

@@ -1,7 +1,7 @@
 /** HQ-LP3: 24 V DC inputs beside a relay card whose three commons stand on three supplies, one from another panel. */
-import type { DeviceOf } from '../../../../shared/panel/device';
 import type { Panel, Point } from '../../../../shared/panel/panelSchema';
 import {
+  acCoil,
   coil24,
   contact,
   diode,
@@ -53,23 +53,6 @@ const outputs = (): Point[] =>
       one.device.load === 'led' ? {} : { suppressor: diode },
     ),
   );
-
-/** The coil of a contactor on AC: six times its holding current while it pulls in. */
-const acCoil = (tag: string, location: string, V: number, A: number): DeviceOf<'load'> => ({
-  kind: 'load',
-  tag,
-  location,
-  load: 'coil',
-  V,
-  current: 'ac',
-  A,
-  inrushA: 6 * A,
-  inrushMs: 20,
-  pickUpPct: 85,
-  dropOutPct: 15,
-  polarised: false,
-  suppressed: false,
-});
 
 const onAc = { role: 'neutral', colour: 'BU', signal: 'RD' } as const;
 // Circuits that stay live with the panel's own disconnect open are orange (IEC 60204-1).
