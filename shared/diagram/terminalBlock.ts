@@ -38,7 +38,7 @@ function currentLabel(facts: LoopFacts, { signal, columnSide }: Frame, middle: n
     tagLabel([middle, y], `${figures(on.mA)} mA`, {
       anchor: 'middle',
       size: 12,
-      room: facts.field === 'both-poles' ? 46 : 62,
+      room: facts.field === 'both-poles' ? 44 : 62,
     }),
   ];
 }

@@ -7,7 +7,13 @@ import { useWords } from '../../components/words';
 export function ExceptionsSection({ document }: { document: RecordDocument }) {
   const { t } = useWords();
   const rounds = document.rounds.filter((round) => round.number > 1);
-  const none = document.findings.length + document.holds.length + rounds.length === 0;
+  const said = [
+    ...document.returned.map((each) => ({ ...each, what: t('records.returned') })),
+    ...document.chosen.map((each) => ({ ...each, what: t('records.chosen') })),
+    ...document.drawingDiffers.map((each) => ({ ...each, what: t('records.drawingDiffers'), shown: null })),
+    ...document.notes.map((each) => ({ ...each, what: t('records.note'), shown: null })),
+  ];
+  const none = document.findings.length + document.holds.length + rounds.length + said.length === 0;
   return (
     <SheetSection title={t('records.exceptions')}>
       {none && <p className="m-0">{t('records.exceptions.none')}</p>}
@@ -31,6 +37,12 @@ export function ExceptionsSection({ document }: { document: RecordDocument }) {
                     words: hold.decidedWords ?? '',
                   })}
             </span>
+          </li>
+        ))}
+        {said.map((each) => (
+          <li key={`${each.what} ${each.at} ${each.words}`} className="border-b border-rule py-2">
+            <strong>{each.what}</strong> {each.shown !== null && `${each.shown}: `}
+            {each.words}. {each.person}, <Moment at={each.at} form="exact" />
           </li>
         ))}
         {document.findings.map((finding) => (

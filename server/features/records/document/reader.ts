@@ -19,7 +19,8 @@ export interface Reader {
 
 export function readerOf(folded: FoldedJob, language: Language, names: ReadonlyMap<string, string>): Reader {
   const { state, pack } = folded;
-  const rounds = new Map([state.round, ...state.rounds].map(({ id, number }) => [id, number]));
+  // The first round is started by no entry: its name is empty.
+  const rounds = new Map([['', 1] as const, ...state.rounds.map(({ id, number }) => [id, number] as const)]);
   return {
     folded,
     language,

@@ -48,7 +48,9 @@ export class Pen {
   }
 
   width(text: string, { face = 'words', size = usualSize }: Written = {}): number {
-    return text.split(' ').reduce((sum, word) => sum + this.run(`${word} `, face, size).width, 0);
+    const words = text.split(' ');
+    const spaces = (words.length - 1) * this.widthOf(' ', face) * size;
+    return words.reduce((sum, word) => sum + this.run(word, face, size).width, spaces);
   }
 
   /** A word longer than the line (a digest, say) is broken where the line ends. */

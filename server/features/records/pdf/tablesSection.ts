@@ -41,7 +41,7 @@ export function deadTestSection({ sheet, words: { t, at }, document }: Printing)
     [
       { head: t('records.round'), share: 7 },
       { head: t('records.between'), share: 20, written: tag },
-      { head: t('records.pair'), share: 9, written: tag },
+      { head: t('records.pair'), share: 15, written: tag },
       { head: t('records.supply'), share: 10, written: tag },
       { head: t('records.reading'), share: 12, written: bold },
       { head: t('records.verdict'), share: 12 },
