@@ -19,6 +19,7 @@ function facts(pack: Pack, status: string, logs: WorkLog[], keys: DeviceKey[]): 
     people: pack.people.map(({ id: person, name, part }) => ({ id: person, name, part })),
     logs: Object.fromEntries([...ofPack, ...ofServer, ...ofDevice]),
     cancelled: status === 'cancelled',
+    pack: pack.digest,
   };
 }
 

@@ -65,6 +65,7 @@ export class Folding {
       people: members.map(({ person, part }) => ({ id: person, name: names.get(person) ?? '', part })),
       logs: Object.fromEntries(owners.map(({ log, person }) => [log, person])),
       cancelled: job.cancelledAt !== null,
+      ...(job.pack !== null && { pack: job.pack }),
     };
   }
 }

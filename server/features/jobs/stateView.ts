@@ -19,7 +19,8 @@ interface Reader {
 
 function readerOf({ pack, facts, state }: FoldedJob, language: Language): Reader {
   const names = new Map(facts.people.map(({ id, name }) => [id, name]));
-  const rounds = new Map([state.round, ...state.rounds].map(({ id, number }) => [id, number]));
+  // The first round is started by no entry: its name is empty.
+  const rounds = new Map([['', 1] as const, ...state.rounds.map(({ id, number }) => [id, number] as const)]);
   return {
     language,
     carried: pack.wording[language],

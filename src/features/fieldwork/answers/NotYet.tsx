@@ -1,19 +1,24 @@
+import { useState } from 'react';
 import type { Step } from '../../../../shared/checklist/types';
 import type { Refusal } from '../../../../shared/job/types';
 import { paths } from '../../../app/paths';
-import { FieldLink } from '../../../components/field/FieldButton';
+import { FieldButton, FieldLink } from '../../../components/field/FieldButton';
 import { MarkedText } from '../../../components/field/MarkedText';
 import { useWords } from '../../../components/words';
 import { nextFor } from '../job/engine';
 import { useFieldJob } from '../job/useFieldJob';
 import { ClearList } from '../locks/ClearList';
 import { StepFrame } from '../step/StepFrame';
+import { RoundSheet } from './RoundSheet';
 
 /** This step's gate is shut for this person: why, in words, and the way to what opens it. */
 export function NotYet({ step, refusals }: { step: Step; refusals: Refusal[] }) {
   const { t } = useWords();
   const { pack, local, me, marked } = useFieldJob();
+  const [opened, setOpened] = useState(false);
   const next = nextFor(local, me.person);
+  // Work that comes back after Locks off starts with isolating again.
+  const needsRound = refusals.some(({ code }) => code === 'isolation-over');
   return (
     <StepFrame
       step={step}
@@ -29,7 +34,24 @@ export function NotYet({ step, refusals }: { step: Step; refusals: Refusal[] }) 
               ))}
             </ul>
           </div>
-          {step.stage === 'close' && <ClearList />}
+          {step.ask.kind === 'close' && <ClearList />}
+          {needsRound && (
+            <FieldButton
+              onClick={() => {
+                setOpened(true);
+              }}
+            >
+              {t('field.out.round')}
+            </FieldButton>
+          )}
+          {opened && (
+            <RoundSheet
+              step={step}
+              onClose={() => {
+                setOpened(false);
+              }}
+            />
+          )}
         </>
       }
       primary={

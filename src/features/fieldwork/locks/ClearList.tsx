@@ -3,15 +3,14 @@ import type { PackPerson } from '../../../../shared/api/jobs';
 import { FieldButton } from '../../../components/field/FieldButton';
 import { useWords } from '../../../components/words';
 import { useFieldJob } from '../job/useFieldJob';
-import { clearPeople } from './clearPeople';
 import { ClearSheet } from './ClearSheet';
 
 /** Everyone given the job, and who has said to be clear: each with their own PIN, before power comes back. */
 export function ClearList() {
   const { t } = useWords();
-  const { pack, local, state } = useFieldJob();
+  const { pack, state } = useFieldJob();
   const [asking, setAsking] = useState<PackPerson>();
-  const clear = clearPeople(local.entries, state);
+  const clear = new Set(state.clear);
   const workers = pack.people.filter(({ part }) => part === 'electrician');
   return (
     <section className="grid gap-2 border-2 border-ink bg-sheet p-3">
