@@ -68,7 +68,7 @@ describe('the fold of random jobs', () => {
         );
         expect(foldJob(checklist, shuffled, job.facts)).toEqual(job.state());
       }),
-      { numRuns: runs },
+      { numRuns: runs, endOnFailure: true },
     );
   });
 
@@ -91,7 +91,7 @@ describe('the fold of random jobs', () => {
           });
         }
       }),
-      { numRuns: Math.ceil(runs / 3) },
+      { numRuns: Math.ceil(runs / 3), endOnFailure: true },
     );
     // The property says something only when work was counted.
     expect(counted).toBeGreaterThan(20);
@@ -114,7 +114,7 @@ describe('the fold of random jobs', () => {
             for (const step of needsIsolation) expect(gateFor(checklist, state, id, step).open).toBe(false);
         }
       }),
-      { numRuns: runs },
+      { numRuns: runs, endOnFailure: true },
     );
   });
 
@@ -127,7 +127,7 @@ describe('the fold of random jobs', () => {
           .map(({ step, answer }) => [step.id, answer.refusals?.map(({ code }) => code)]);
         expect(refused).toEqual([]);
       }),
-      { numRuns: runs },
+      { numRuns: runs, endOnFailure: true },
     );
   });
 
@@ -140,7 +140,7 @@ describe('the fold of random jobs', () => {
           if (next) expect(checklist.steps.some((step) => step.id === next.id)).toBe(true);
         }
       }),
-      { numRuns: Math.ceil(runs / 3) },
+      { numRuns: Math.ceil(runs / 3), endOnFailure: true },
     );
   });
 });
