@@ -1,6 +1,5 @@
 import { useEffect } from 'react';
 import { Outlet } from 'react-router-dom';
-import { useSession } from '../api/session';
 import type { Text } from '../../shared/panel/says';
 import { SheetFrame } from '../components/sheet/SheetFrame';
 import { SheetPage } from '../components/sheet/SheetPage';
@@ -26,12 +25,10 @@ function NotHere({ reasons }: { reasons: Text[] }) {
 }
 
 function Field({ store }: { store: DeviceStore }) {
-  const session = useSession();
-  const signedIn = session.data?.person.id;
   useEffect(() => {
-    // What waited for somebody to sign in goes at once.
-    if (signedIn !== undefined) void store.sendNow();
-  }, [store, signedIn]);
+    // Whoever comes from the sign-in page has just made sending possible.
+    void store.sendNow();
+  }, [store]);
   return (
     <DeviceProvider store={store}>
       <Outlet />

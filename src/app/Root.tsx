@@ -1,11 +1,11 @@
 import { Outlet, ScrollRestoration } from 'react-router-dom';
-import { Providers } from './Providers';
+import { WordsProvider } from '../components/words';
 
 export function Root() {
   return (
-    <Providers>
+    <WordsProvider>
       <Outlet />
       <ScrollRestoration />
-    </Providers>
+    </WordsProvider>
   );
 }

@@ -1,9 +1,9 @@
 import { createBrowserRouter, type PatchRoutesOnNavigationFunction } from 'react-router-dom';
 import { FaultPage } from './FaultPage';
-import { Home } from './Home';
 import { officeRoutes } from './officeRoutes';
 import { paths } from './paths';
 import { Root } from './Root';
+import { withServer } from './withServer';
 
 const pages = 'pages';
 const fieldPath = /^\/my(\/|$)/;
@@ -28,8 +28,10 @@ export const router = createBrowserRouter(
           id: pages,
           errorElement: <FaultPage />,
           children: [
-            { path: paths.home, Component: Home },
-            ...officeRoutes,
+            withServer([
+              { path: paths.home, lazy: async () => ({ Component: (await import('./Home')).Home }) },
+              ...officeRoutes,
+            ]),
             { path: '*', lazy: async () => ({ Component: (await import('./NotFound')).NotFound }) },
           ],
         },

@@ -1,7 +1,7 @@
 /** Makes a signed-in person's key on this device, registers its public half and keeps their PIN's verifier. */
 import { v7 } from 'uuid';
 import { z } from 'zod';
-import { keyRequest, type deviceRequest } from '../../shared/api/jobs';
+import { keyRequest, type deviceRequest } from '../../shared/api/deviceWire';
 import { request } from '../api/request';
 import type { DeviceEnvironment } from './environment';
 import { deviceId } from './deviceId';

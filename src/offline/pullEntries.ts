@@ -1,5 +1,5 @@
 /** Pulls a job's entries page by page; the cursor moves in the same transaction as what it counts. */
-import { entriesPage, type EntriesPage } from '../../shared/api/jobs';
+import { entriesPage, type EntriesPage } from '../../shared/api/deviceWire';
 import type { Entry } from '../../shared/job/entry';
 import type { Databases } from './databases';
 import type { DeviceEnvironment } from './environment';

@@ -1,5 +1,5 @@
 /** Pulls the packs of the signed-in person's jobs that this device does not have yet. */
-import { packList } from '../../shared/api/jobs';
+import { packList } from '../../shared/api/deviceWire';
 import type { Databases } from './databases';
 import type { DeviceEnvironment } from './environment';
 import { packIntegrity, type PackVerdict } from './packIntegrity';

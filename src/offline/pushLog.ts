@@ -1,5 +1,5 @@
 /** Sends one log's unsent entries of one job until none is left, the server refuses, or nobody answers. */
-import { entriesAnswer, headsProblem } from '../../shared/api/jobs';
+import { entriesAnswer, headsProblem } from '../../shared/api/deviceWire';
 import type { Entry } from '../../shared/job/entry';
 import { acknowledge } from './acknowledge';
 import { batch, maxBatchEntries } from './batch';
