@@ -1,6 +1,7 @@
 /** The ordered list of middleware and routes, nothing else. */
 import compression from 'compression';
 import express, { type Express } from 'express';
+import { contractRoutes } from './features/contract/routes';
 import { devicesRoutes } from './features/devices/routes';
 import { entriesRoutes } from './features/entries/routes';
 import { jobsRoutes } from './features/jobs/routes';
@@ -32,6 +33,7 @@ export function createApp(services: Services): Express {
   app.use(compression());
   app.use('/api', noStore);
   app.use('/api', healthRoutes(readiness(services.database)));
+  app.use('/api', contractRoutes());
   app.use(staticClient());
   app.use('/api', services.session.handlers);
   app.use('/api', crossSite);

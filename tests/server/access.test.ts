@@ -85,12 +85,7 @@ function urlOf(route: DeclaredRoute): string {
     .replace(':sha256', 'a'.repeat(64));
 }
 
-const send = (
-  agent: Agent | ReturnType<typeof request>,
-  { method, path }: DeclaredRoute,
-  url: string,
-  body?: object,
-) => {
+const send = (agent: Agent, { method, path }: DeclaredRoute, url: string, body?: object) => {
   const verb = (['get', 'post', 'put', 'patch', 'delete'] as const).find((each) => each === method);
   if (!verb) throw new Error(`${method} ${path} is no method that this test knows`);
   return verb === 'get' ? agent.get(url) : agent[verb](url).send(body ?? {});

@@ -3,7 +3,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import request from 'supertest';
 import type { Entry } from '../../shared/job/entry';
 import * as pushes from '../support/entryPushes';
-import { changed, withoutSignature } from '../support/entryPushes';
+import { withoutSignature } from '../support/entryPushes';
 import { seedWorks, type Works } from '../support/seedWorks';
 import { signIn } from '../support/seedPeople';
 import { enrolDevice, signed, type SigningDevice, SignedLog } from '../support/signingDevice';

@@ -1,6 +1,5 @@
 import { randomBytes } from 'node:crypto';
 import { Client } from 'pg';
-import request from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { v7 } from 'uuid';
 import { findingsAnswer, panelCheck, panelRow, panelView, revisionView } from '../../shared/api/panels';
@@ -364,10 +363,4 @@ describe('the stateless check', () => {
     const answer = await foreman.post('/api/panel-checks').send(body).expect(422);
     expect(answer.body.errors.map((each: { path: string }) => each.path)).toEqual(['scope.1', 'open.0']);
   });
-});
-
-it('publishes the panel file’s JSON Schema to anybody', async () => {
-  const answer = await request(server.app).get('/api/schema/panel.json').expect(200);
-  expect(answer.body.properties.format).toMatchObject({ const: 'coldloop-panel/1' });
-  expect(answer.body.additionalProperties).toBe(false);
 });

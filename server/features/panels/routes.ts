@@ -7,7 +7,7 @@ import {
   panelUpload,
   revisionIssue,
 } from '../../../shared/api/panels';
-import { maxPanelBytes, panelSchema } from '../../../shared/panel/panelSchema';
+import { maxPanelBytes } from '../../../shared/panel/panelSchema';
 import { actorOf, authorise } from '../../http/authorise';
 import { limitInFlight } from '../../http/inFlight';
 import { languageOf } from '../../http/language';
@@ -34,11 +34,7 @@ export function panelsRoutes(panels: PanelsService, revisions: RevisionsService)
   const router = Router();
   const readers = () => authorise({ roles: panelReaders });
   const editors = () => authorise({ roles: panelEditors });
-  const schema = z.toJSONSchema(panelSchema, { target: 'draft-2020-12' });
 
-  router.get('/schema/panel.json', authorise({ who: 'anyone' }), (_request, response) => {
-    response.type('application/schema+json').send(JSON.stringify(schema));
-  });
   router.get('/panels', readers(), async (request, response) => {
     response.json(await panels.list(actorOf(request), parse(panelQuery, request.query)));
   });
