@@ -274,7 +274,7 @@ describe('the main job', () => {
     const text = execFileSync('pdftotext', ['-layout', file, '-'], { encoding: 'utf8' });
     for (const expected of [mixedPanel.tag, electrician, foreman, '118']) expect(text).toContain(expected);
     const readings = await server.services.database.query<{ value: number }[]>(
-      `SELECT DISTINCT (body->'value'->>'value')::float AS value FROM entry WHERE job = $1 AND kind = 'answer' AND body->'value'->>'kind' = 'reading'`,
+      `SELECT DISTINCT (content::jsonb #>> '{body,value,value}')::float AS value FROM entry WHERE job = $1 AND kind = 'answer' AND content::jsonb #>> '{body,value,kind}' = 'reading'`,
       [phone.job],
     );
     expect(readings.length).toBeGreaterThan(3);
