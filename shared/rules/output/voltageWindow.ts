@@ -10,6 +10,9 @@ const id = 'output.voltage-window';
 /** A load takes its rated volts with the tolerance of the supplies it is made for (IEC 61131-2: +20 % DC, +10 % AC). */
 const loadTakes = { dc: 1.2, ac: 1.1 };
 
+// 400 V between lines is 230.9 V to neutral, and both are called 230/400 V (IEC 60038).
+const nameRounding = 1.005;
+
 function ofOutput(at: OutputGroup): Outcome {
   const { io, ioPath, volts, place, supply } = at;
   const tooHigh = volts.maxV > io.Vmax;
@@ -40,7 +43,7 @@ function ofLoad({ supply, volts }: OutputGroup, point: PointPlace, load: DrawnLo
   // A resistive load or a filament lamp does not care which kind of current heats it.
   const cares = load.load !== 'resistive' && load.load !== 'lamp';
   const variant =
-    cares && load.current !== current ? 'load-kind' : volts.maxV > limitV + 1e-9 ? 'load-high' : '';
+    cares && load.current !== current ? 'load-kind' : volts.maxV > limitV * nameRounding ? 'load-high' : '';
   if (variant === '') return [];
   return [
     found(id, {
