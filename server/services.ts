@@ -16,6 +16,7 @@ import { startMailWorker } from './features/mail/worker';
 import { RecordBooks } from './features/records/books';
 import { RecordPdfs } from './features/records/pdfStore';
 import { SealingService } from './features/records/service';
+import { repeatedly } from './features/records/repeatedly';
 import { RecordVerifying } from './features/records/verifying';
 import { RevisionsService } from './features/panels/revisions';
 import { PanelsService } from './features/panels/service';
@@ -23,6 +24,9 @@ import { PeopleService } from './features/people/service';
 import { sessionParts, type SessionParts } from './features/sessions/middleware';
 import { SessionsService } from './features/sessions/service';
 import { SitesService } from './features/sites/service';
+
+/** What was missed when a server stopped in the wrong moment waits this long at most. */
+const sealAgainMs = 5 * 60_000;
 
 export interface Services {
   config: Config;
@@ -68,7 +72,10 @@ export async function createServices(config: Config): Promise<Services> {
   const boards = new JobBoards(database, people, folding, turns);
   const choices = new JobChoices(database, revisions, sites);
   const jobs = new JobsService({ database, mail, people, devices, choices, boards, turns });
-  const sealing = new SealingService({ database, turns, people, mail });
+  const notSealed = (job: string, error: unknown) =>
+    log.error({ err: error, job }, 'not sealed; tried again soon');
+  const sealing = new SealingService({ database, turns, people, mail, failed: notSealed });
+  const sealingAgain = repeatedly(sealAgainMs, () => sealing.sealWaiting());
   const panelOf = async (pack: string) => (await folding.pack(database.manager, pack)).panel;
   const pdfs = new RecordPdfs({ database, baseUrl: config.baseUrl, panelOf });
   const records = new RecordBooks(database, pdfs);
@@ -76,7 +83,7 @@ export async function createServices(config: Config): Promise<Services> {
   const afterEntries = (job: string) =>
     sealing.sealIfReady(job).then(
       () => undefined,
-      (error: unknown) => log.error({ err: error, job }, 'sealing failed; the next push tries again'),
+      (error: unknown) => notSealed(job, error),
     );
   const entries = new EntriesService({ database, people, devices, turns, boards, store, afterEntries });
   return {
@@ -98,8 +105,12 @@ export async function createServices(config: Config): Promise<Services> {
     sealing,
     records,
     verifying,
-    start: () => startMailWorker(boss, config, log, (record) => pdfs.of(record)),
+    start: async () => {
+      await startMailWorker(boss, config, log, (record) => pdfs.of(record));
+      sealingAgain.start();
+    },
     close: async () => {
+      await sealingAgain.stop();
       await boss.stop({ graceful: true, wait: true, timeout: 5_000 });
       await session.close();
       await database.destroy();

@@ -1,6 +1,6 @@
 import { Client } from 'pg';
 import request from 'supertest';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { healthyPanel } from '../../server/commands/demo/panels/healthy';
 import { chainBreaks } from '../../server/features/records/chainBreaks';
 import type { Unready } from '../../server/features/records/ready';
@@ -169,6 +169,33 @@ describe('entries after the seal', () => {
       amendedBy: [late.number],
     });
     expect(await office.server.services.sealing.sealIfReady(job.id)).toEqual({ sealed: false, reasons: [] });
+  });
+});
+
+describe('a server that failed between taking entries and sealing', () => {
+  it('seals and amends later what it missed, each once', async () => {
+    const failing = vi
+      .spyOn(office.server.services.sealing, 'sealIfReady')
+      .mockRejectedValue(new Error('stopped'));
+    const job = await office.sealedJob();
+    failing.mockRestore();
+    const numbers = async () =>
+      (await office.rows('limit=200')).filter(({ jobNumber }) => jobNumber === job.packed.job.number);
+    expect(await numbers()).toEqual([]);
+    await office.server.services.sealing.sealWaiting();
+    expect(await numbers()).toHaveLength(1);
+
+    const again = vi
+      .spyOn(office.server.services.sealing, 'sealIfReady')
+      .mockRejectedValue(new Error('stopped'));
+    job.write(job.person('electrician'), 'note', { words: 'Left the key with the guard' });
+    await job.deliver(office.agent('Ada Volt'));
+    again.mockRestore();
+    await Promise.all([
+      office.server.services.sealing.sealWaiting(),
+      office.server.services.sealing.sealWaiting(),
+    ]);
+    expect((await numbers()).map(({ amendment }) => amendment)).toEqual([true, false]);
   });
 });
 

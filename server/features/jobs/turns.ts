@@ -116,6 +116,17 @@ export class JobTurns {
     return job && folded ? { job: sealable(job), folded } : null;
   }
 
+  /** Jobs that a record may be missing for: countersigned, or sealed and heard from since their newest record. */
+  async awaitingRecord(tx: EntityManager): Promise<string[]> {
+    const rows = await tx.query<{ id: string }[]>(
+      `SELECT j.id FROM job j WHERE j.status = 'countersigned' AND j.record IS NULL
+       UNION ALL
+       SELECT j.id FROM job j WHERE j.record IS NOT NULL
+         AND j.last_order > (SELECT max(r.last_order) FROM record r WHERE r.job = j.id)`,
+    );
+    return rows.map(({ id }) => id);
+  }
+
   /** Names the record of a sealed job. The row must be taken. */
   async sealed(tx: EntityManager, id: string, record: string, at: Date): Promise<void> {
     await tx.update(JobEntity, { id }, { record, sealedAt: at, status: 'sealed', waits: false });

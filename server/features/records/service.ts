@@ -25,6 +25,8 @@ interface SealParts {
   turns: JobTurns;
   people: PeopleService;
   mail: MailQueue;
+  /** Told of a job whose sealing failed; it is tried again. */
+  failed: (job: string, error: unknown) => void;
   now?: () => Date;
 }
 
@@ -51,6 +53,15 @@ export class SealingService {
       await this.parts.turns.sealed(tx, id, record.id, record.sealedAt);
       return { sealed: true, record: record.id, number: record.number };
     });
+  }
+
+  /**
+   * Makes up for what was missed when a server stopped, or failed, between taking entries and sealing.
+   * One job that fails does not keep the others from being sealed.
+   */
+  async sealWaiting(): Promise<void> {
+    for (const id of await this.parts.turns.awaitingRecord(this.parts.database.manager))
+      await this.sealIfReady(id).catch((error: unknown) => this.parts.failed(id, error));
   }
 
   private async amend(tx: EntityManager, taken: Taken, first: string): Promise<SealOutcome> {
