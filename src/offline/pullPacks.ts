@@ -31,14 +31,14 @@ async function store(
   });
 }
 
-/** Answers how it ended and which jobs are the person's now. */
+/** Answers how it ended and which jobs are the person's now; null when the server did not say. */
 export async function pullPacks(
   env: DeviceEnvironment,
   databases: Databases,
-): Promise<{ outcome: RoundOutcome; jobs: string[] }> {
+): Promise<{ outcome: RoundOutcome; jobs: string[] | null }> {
   const have = await databases.work.run((database) => database.getAllKeys('packs'));
   const answer = await serverCall(env, packList, `/api/my/packs?have=${have.join(',')}`);
-  if (answer.kind !== 'ok') return { outcome: outcomeOf(answer), jobs: [] };
+  if (answer.kind !== 'ok') return { outcome: outcomeOf(answer), jobs: null };
   const verdicts = answer.value.packs.map(packIntegrity);
   await store(databases, verdicts, answer.value.current);
   const [bad] = verdicts.filter((verdict) => !verdict.ok);

@@ -1,5 +1,6 @@
 /** One sending round: push every log, then pull packs and entries. Push comes first, so a pull never hides what is unsent. */
 import { pullEntries } from './pullEntries';
+import { pruneSealed } from './pruneSealed';
 import { pullPacks } from './pullPacks';
 import { pushLog, type PushContext } from './pushLog';
 import { done, worse, type RoundOutcome } from './roundOutcome';
@@ -41,5 +42,7 @@ export async function sendingRound(context: PushContext, { only }: RoundScope): 
   if (only) return pullJobs(context, only, pushed);
   const { outcome, jobs } = await pullPacks(context.env, context.databases);
   const pulled = worse(pushed, outcome);
-  return pulled.end === 'wait' ? pulled : pullJobs(context, jobs, pulled);
+  if (jobs === null) return pulled;
+  await pruneSealed(context.databases, jobs);
+  return pullJobs(context, jobs, pulled);
 }

@@ -268,3 +268,42 @@ describe('when it sends', () => {
     expect(server.requests).toHaveLength(before);
   });
 });
+
+describe('what a sealed job leaves', () => {
+  const rowsOf = async (device: Awaited<ReturnType<typeof cutOff>>['device']) => {
+    const { work } = device.disk();
+    return work.run(async (database) => [
+      await database.count('jobs'),
+      await database.count('packs'),
+      await database.count('entries'),
+    ]);
+  };
+
+  test.each([
+    ['stays while the server still names it', 'sealed', true, [1, 1, 2]],
+    ['goes when the server names it no more', 'sealed', false, [0, 0, 0]],
+    ['stays when it is only gone from the list', 'signed', false, [1, 1, 2]],
+  ])('%s', async (_name, status, named, rows) => {
+    const { device, server, store } = await cutOff(2);
+    server.status = status;
+    await store.sendNow();
+    if (!named) server.packs = [];
+    await store.sendNow();
+    expect(await rowsOf(device)).toEqual(rows);
+  });
+
+  test('never goes while an answer of it is unsent', async () => {
+    const { device, server, store } = await cutOff(2);
+    server.status = 'sealed';
+    await store.sendNow();
+    server.packs = [];
+    const late = await store.append(mara.id, jobId, 'note', note('late'));
+    server.refused.add(late.id);
+    await store.sendNow();
+    expect(store.sendState()).toMatchObject({ unsent: 1 });
+    expect((await rowsOf(device))[0]).toBe(1);
+    server.refused.clear();
+    await store.sendNow();
+    expect(store.sendState()).toMatchObject({ unsent: 0 });
+  });
+});
