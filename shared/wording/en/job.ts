@@ -43,27 +43,20 @@ export const job = {
     '{isolator} was closed while lock {lock} of {name} may have been on it.',
   'job.contradiction.lock-twice': 'Lock {lock} is said to be on {isolator} and on {other}.',
   'job.contradiction.two-contents': 'One report came in two versions.',
+  'job.seal.cancelled': 'This job was cancelled.',
   'job.seal.not-countersigned': 'The job is not countersigned, or something came after it.',
-  'job.seal.unsettled': 'This step is still open: {step}',
   'job.seal.not-signed': 'Not every answer is signed by the person who gave it.',
   'job.seal.same-person': '{name} worked on this job and countersigned it.',
-  'job.seal.lock-on': 'Lock {lock} of {name} is still on {isolator}.',
+  'job.seal.step-open': 'This step is still open: {step}',
+  'job.seal.hold-undecided': '{n, plural, one {One hold waits} other {# holds wait}} for the foreman.',
   'job.seal.contradiction': 'Two reports cannot both be true. {what}',
   'job.seal.gap': '{n, plural, one {One phone has} other {# phones have}} reports that never arrived.',
-  'job.seal.unreadable': 'There are reports of a kind that this version cannot read.',
-  'job.seal.set-aside': '{n, plural, one {One report is} other {# reports are}} set aside and not decided.',
-  'job.seal.bad-signature':
-    '{n, plural, one {One report has} other {# reports have}} a signature that does not fit its key.',
-  'job.seal.key':
-    '{n, plural, one {One report was} other {# reports were}} signed with a key that did not count then.',
-  'job.seal.pack':
-    '{n, plural, one {One report answers} other {# reports answer}} a checklist that was never issued.',
-  'job.seal.digest':
-    '{n, plural, one {One signature covers} other {# signatures cover}} something else than what was shown.',
-  'job.seal.photo':
-    '{n, plural, one {One photo has} other {# photos have}} not arrived and {n, plural, one {is} other {are}} not written off.',
-  'job.seal.log-open': 'Not everything may have arrived from {names}.',
-  'job.seal.other-phone':
-    'The countersignature was made on another person’s phone. The foreman must confirm it.',
-  'job.seal.refused-lock': 'Isolator {isolator} is not known to be closed.',
+  'job.seal.unknown-kind':
+    '{n, plural, one {One report is} other {# reports are}} of a kind that this version cannot read.',
+  'job.seal.lock-on': 'Lock {lock} of {name} is still on {isolator}.',
+  'job.seal.isolator-not-known': 'Nobody knows for sure how {isolator} stands.',
+  'job.seal.danger':
+    '{n, plural, one {One dead reading was} other {# dead readings were}} over the limit and never measured again.',
+  'job.seal.temporary-left':
+    '{n, plural, one {One temporary change is} other {# temporary changes are}} still in the panel.',
 } as const;

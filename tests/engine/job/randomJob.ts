@@ -37,13 +37,21 @@ interface Turn {
 
 const at = <T>(list: readonly T[], pick: number): T | undefined => list[pick % Math.max(1, list.length)];
 
+/** What stands on one's own padlock there. */
+function ownNumber({ state, person }: Turn, isolator: string): string {
+  const own = state.locks.find(
+    (lock) => lock.person === person.id && lock.isolator === isolator && lock.offAt === undefined,
+  );
+  return own?.lock ?? lockNumber(person, isolator);
+}
+
 function write(turn: Turn, step: Step): void {
   const { job, device, person } = turn;
   const { ask } = step;
   if (ask.kind === 'lock-on' || ask.kind === 'lock-off')
     job.writeDeaf(device, ask.kind, {
       isolator: ask.isolator,
-      lock: lockNumber(person, ask.isolator),
+      lock: ask.kind === 'lock-off' ? ownNumber(turn, ask.isolator) : lockNumber(person, ask.isolator),
       step: step.id,
     });
   else if (ask.kind === 'close')
