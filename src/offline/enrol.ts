@@ -8,7 +8,7 @@ import { deviceId } from './deviceId';
 import type { DeviceKey, Outbox } from './outboxDatabase';
 import { isStrongPin, makeVerifier } from './pin';
 import { keyAlgorithm } from './signEntry';
-import { WeakPinError } from './types';
+import { OtherPersonError, WeakPinError } from './types';
 
 interface Person {
   id: string;
@@ -31,6 +31,13 @@ async function keyFor(env: DeviceEnvironment, outbox: Outbox, person: string): P
   });
 }
 
+/** The server gives a key to whoever is signed in: had that changed in another tab, one would sign as the other. */
+async function mustBeSignedIn(env: DeviceEnvironment, person: string): Promise<void> {
+  const session = z.looseObject({ person: z.looseObject({ id: z.uuid() }) });
+  const { person: signedIn } = await request(session, '/api/session', { fetch: env.fetch });
+  if (signedIn.id !== person) throw new OtherPersonError('another person is signed in');
+}
+
 /** Both requests carry ids made here and may be repeated. */
 async function register(env: DeviceEnvironment, device: string, key: DeviceKey): Promise<void> {
   const jwk = await env.subtle.exportKey('jwk', key.pair.publicKey);
@@ -46,7 +53,7 @@ async function register(env: DeviceEnvironment, device: string, key: DeviceKey):
 }
 
 /**
- * @throws WeakPinError for a PIN under six digits; ProblemError or UnreachableError when the server did not take
+ * @throws WeakPinError for a PIN under six digits; OtherPersonError when somebody else is signed in; ProblemError or UnreachableError when the server did not take
  * the key, in which case nobody is enrolled.
  */
 export async function enrol(
@@ -56,6 +63,7 @@ export async function enrol(
   pin: string,
 ): Promise<void> {
   if (!isStrongPin(pin)) throw new WeakPinError('a PIN has six digits or more');
+  await mustBeSignedIn(env, person);
   const key = await keyFor(env, outbox, person);
   await register(env, await deviceId(env, outbox), key);
   const verifier = await makeVerifier(env.subtle, pin, (length) => env.randomBytes(length));

@@ -53,6 +53,9 @@ export class NotSavedError extends Error {
 /** Thrown by `enrol` for a PIN that is not six digits or more. */
 export class WeakPinError extends Error {}
 
+/** Thrown by `enrol` when the session is not that person's. */
+export class OtherPersonError extends Error {}
+
 /** Whether this browser can keep work without a signal at all; `reasons` are shown, never guessed around. */
 export type OfflineSupport = { ok: true } | { ok: false; reasons: Text[] };
 

@@ -17,7 +17,8 @@ const json = (body: unknown) =>
 const basement: typeof fetch = (input) => {
   const url = typeof input === 'string' ? input : input instanceof URL ? input.href : input.url;
   if (url.includes('/entries')) return Promise.reject(new TypeError('no signal'));
-  if (!url.includes('/my/packs')) return Promise.resolve(json({ id: jobId }));
+  if (!url.includes('/my/packs'))
+    return Promise.resolve(json({ id: jobId, person: { id: electrician.person } }));
   const { digest } = samplePack;
   return Promise.resolve(json({ packs: [samplePack], current: [{ job: jobId, digest, status: 'sent' }] }));
 };
@@ -29,7 +30,10 @@ async function timeOf(run: () => Promise<unknown>): Promise<number> {
 }
 
 async function measure(): Promise<AnswerSaved> {
-  const store = new LocalDeviceStore({ ...browserEnvironment({ language: () => 'en', say: ({ key }) => key }), fetch: basement });
+  const store = new LocalDeviceStore({
+    ...browserEnvironment({ language: () => 'en', say: ({ key }) => key }),
+    fetch: basement,
+  });
   const me = { id: electrician.person, name: electrician.name, email: electrician.email };
   await store.enrol(me, '481516');
   await store.sendNow();

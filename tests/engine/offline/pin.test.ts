@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { isStrongPin, pinDelayMs } from '../../../src/offline/pin';
-import { WeakPinError } from '../../../src/offline/types';
+import { OtherPersonError, WeakPinError } from '../../../src/offline/types';
 import { enrolledDevice, mara, pinOf } from '../../support/offline/enrolled';
 
 const wrong = '000000';
@@ -84,11 +84,14 @@ describe('PIN', () => {
   test('a server that does not answer enrols nobody; the next try uses the same key', async () => {
     const { server, store } = await enrolledDevice();
     const other = { ...mara, id: '0190a1b2-0000-7000-8000-0000000000e1' };
+    // Signed in as somebody else: the server would give the key to her.
+    await expect(store.enrol(other, pinOf)).rejects.toThrow(OtherPersonError);
+    expect(server.keys.size).toBe(1);
+    server.session = other.id;
     server.loseReplies = 2;
     await expect(store.enrol(other, pinOf)).rejects.toThrow();
     expect(await store.people()).toHaveLength(1);
     server.loseReplies = 0;
-    server.session = other.id;
     await store.enrol(other, pinOf);
     expect(server.keys.size).toBe(2);
   });

@@ -65,6 +65,7 @@ export class FakeServer {
     const { pathname } = url;
     if (method === 'POST' && pathname.endsWith('/entries')) return this.push(body);
     if (this.session === null) return problem(401, 'unauthenticated');
+    if (pathname === '/api/session') return { status: 200, body: { person: { id: this.session } } };
     if (pathname === '/api/devices') return { status: 201, body };
     if (pathname === '/api/devices/keys') return this.register(body);
     if (pathname === '/api/my/packs') return this.list(url);
