@@ -23,7 +23,7 @@ export const cableCapacitance: RuleAt<'point'> = {
           harm: 'fails',
           where: at.where,
           params: { terminal: at.point.terminal, m: at.point.cable?.lengthM ?? 0, V: reading.is.V },
-          because: [...reading.is.because, ...because],
+          because: [...reading.is.because(), ...because],
           ...(remedy && { remedy }),
           ...(addsSteps && { addsSteps }),
         }),

@@ -8,11 +8,20 @@ export interface Fitted {
   path: string;
 }
 
-/** The strings that can switch the input on: the point's device with those in series, and each one in parallel. */
-export function branches({ point, path }: Pick<InputPlace, 'point' | 'path'>): Fitted[][] {
+// Every input rule asks for them: put together once a point.
+const known = new WeakMap<InputPlace['point'], Fitted[][]>();
+
+function reckon({ point, path }: Pick<InputPlace, 'point' | 'path'>): Fitted[][] {
   const series = (point.series ?? []).map((device, n) => ({ device, path: `${path}.series.${n}` }));
   const parallel = (point.parallel ?? []).map((device, n) => [{ device, path: `${path}.parallel.${n}` }]);
   return [[{ device: point.device, path: `${path}.device` }, ...series], ...parallel];
+}
+
+/** The strings that can switch the input on: the point's device with those in series, and each one in parallel. */
+export function branches(at: Pick<InputPlace, 'point' | 'path'>): Fitted[][] {
+  const strings = known.get(at.point) ?? reckon(at);
+  known.set(at.point, strings);
+  return strings;
 }
 
 export const fittedDevices = (at: Pick<InputPlace, 'point' | 'path'>): Fitted[] => branches(at).flat();

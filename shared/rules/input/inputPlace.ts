@@ -24,12 +24,17 @@ function suitsSupply(io: DigitalInput | OptoInput, { kind }: Supply): boolean {
   return io.kind === 'digital-input' ? (io.current === 'ac') === ac : !ac || io.polarity === 'either';
 }
 
+// Every input rule asks at the same places: what they ask is put together once a place.
+const known = new WeakMap<PointPlace, InputPlace>();
+
 /** Asks at an input that is wired; answers nothing elsewhere, and `missing` where the supply is unknown. */
 export function atInput(
   place: PointPlace,
   context: RuleContext,
   ask: (at: InputPlace) => Outcome[],
 ): Outcome[] {
+  const built = known.get(place);
+  if (built) return ask(built);
   const { where, path, point, group, module, supply, volts } = place;
   const io = module?.io;
   if (!group || (io?.kind !== 'digital-input' && io?.kind !== 'opto-input')) return [];
@@ -37,7 +42,9 @@ export function atInput(
   if (!supply || !volts) return [missing(`${group.path}.supply`)];
   const ioPath = `modules.${group.group.module}.io`;
   const { frequencyHz } = context.panel;
-  return ask({ where, path, point, io, ioPath, group: group.group, supply, volts, frequencyHz });
+  const at = { where, path, point, io, ioPath, group: group.group, supply, volts, frequencyHz };
+  known.set(place, at);
+  return ask(at);
 }
 
 /** The same where the loop can be reckoned: AC on a DC input and the reverse belong to `supply.kind`. */

@@ -4,7 +4,7 @@ import { found, missing, quantity, titleOf, type Outcome, type RuleAt } from '..
 import { settleOnSite } from '../settleOnSite';
 import { offerBleeder } from './bleederFor';
 import { worstLeakmA } from './fieldDevices';
-import { atLoop, type InputPlace } from './inputPlace';
+import { atLoop, isAc, type InputPlace } from './inputPlace';
 import { limitsOf } from './limits';
 import { offState } from './offState';
 
@@ -32,7 +32,8 @@ function unsure(at: InputPlace, leakmA: number): Outcome {
 function ask(at: InputPlace): Outcome[] {
   const leakmA = worstLeakmA(at);
   if (leakmA === 0) return [];
-  const reading = offState(at, { leakage: true, capacitance: false });
+  // On DC no cable adds to it.
+  const reading = isAc(at) ? offState(at, { leakage: true, capacitance: false }) : offState(at);
   if ('missing' in reading)
     return reading.missing === `${at.ioPath}.inputOhm` ? [unsure(at, leakmA)] : [missing(reading.missing)];
   if (reading.is.state === 'off') return ['ok'];
@@ -42,7 +43,7 @@ function ask(at: InputPlace): Outcome[] {
       harm: 'fails',
       where: at.where,
       params: { terminal: at.point.terminal, mA: leakmA, V: reading.is.V },
-      because: [...reading.is.because, ...because],
+      because: [...reading.is.because(), ...because],
       remedy: remedy ?? { says: say('finding.remedy.other-sensor') },
       ...(addsSteps && { addsSteps }),
     }),

@@ -66,6 +66,14 @@ function ofOpto(io: Io<'opto-input'>, ioPath: string): Limits {
   };
 }
 
+// Sixteen points share a module's limits.
+const known = new WeakMap<InputPlace['io'], Limits>();
+
 /** Undefined for a custom input without thresholds and for a declared type that the table does not hold at these volts. */
-export const limitsOf = ({ io, ioPath }: Pick<InputPlace, 'io' | 'ioPath'>): Limits | undefined =>
-  io.kind === 'digital-input' ? ofDigital(io, ioPath) : ofOpto(io, ioPath);
+export function limitsOf({ io, ioPath }: Pick<InputPlace, 'io' | 'ioPath'>): Limits | undefined {
+  const reckoned = known.get(io);
+  if (reckoned) return reckoned;
+  const limits = io.kind === 'digital-input' ? ofDigital(io, ioPath) : ofOpto(io, ioPath);
+  if (limits) known.set(io, limits);
+  return limits;
+}

@@ -1,5 +1,6 @@
 /** An aged optocoupler on low supply that no longer pulls its transistor down. */
 import { collectormA, saturationmA } from '../../electrical/optoInput';
+import { say } from '../../panel/says';
 import { found, missing, quantity, titleOf, type Outcome, type RuleAt } from '../rule';
 import { ledReversed } from './fieldDevices';
 import { atLoop, type InputPlace } from './inputPlace';
@@ -19,18 +20,22 @@ function ask(at: InputPlace): Outcome[] {
   if (has >= needs) return ['ok'];
   // Unstated, the saturation volts counted as 0, which asks for most: less may be enough.
   if (vceSat === undefined) return [missing(`${ioPath}.ctr.vceSat`)];
+  const ledmA = needs / ((minPct / 100) * (1 - agePct / 100));
   return [
     found(id, {
       harm: 'fails',
       where,
       params: { has, needs },
       because: [
-        ...on.is.because,
+        ...on.is.because(),
         quantity('transfer-ratio', minPct, '%', `${ioPath}.ctr.minPct`),
         quantity('ageing', agePct, '%', `${ioPath}.ctr.agePct`),
         quantity('collector-current', has, 'mA', 'I·CTR·(1 − age)'),
         quantity('saturation-current', needs, 'mA', '(V − V_CEsat)/R'),
       ],
+      remedy: Number.isFinite(ledmA)
+        ? { says: say(`finding.${id}.remedy`, { mA: ledmA }), values: { mA: ledmA } }
+        : { says: say('finding.remedy.other-sensor') },
     }),
   ];
 }

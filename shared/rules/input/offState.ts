@@ -88,12 +88,7 @@ function optoOff(io: OptoInput, at: InputPlace, off: Off): Known<Bare> {
   return { is: { state: off.limits.state(V, ledmA), V, mA: ledmA } };
 }
 
-/** Reckons the reading from the given causes; `missing` where a number is lacking that decides. */
-export function offState(
-  at: InputPlace,
-  causes: Causes = { leakage: true, capacitance: true },
-  bleederOhm = at.point.bleeder?.ohm ?? Infinity,
-): Known<Reading> {
+function reckon(at: InputPlace, causes: Causes, bleederOhm: number): Known<Reading> {
   const strange = notASwitch(at);
   if (strange !== undefined) return { missing: strange };
   const limits = limitsOf(at);
@@ -111,11 +106,23 @@ export function offState(
   return {
     is: {
       ...read.is,
-      because: [
+      because: () => [
         ...because(at, leakmA, reactance, limits),
         quantity('input-volts', read.is.V, 'V', 'solved loop'),
         quantity(name, read.is.mA, 'mA', 'solved loop'),
       ],
     },
   };
+}
+
+const allCauses: Causes = { leakage: true, capacitance: true };
+const known = new WeakMap<InputPlace, Known<Reading>>();
+
+/** Reckons the reading, as wired unless said otherwise; `missing` where a number is lacking that decides. */
+export function offState(at: InputPlace, causes = allCauses, bleederOhm?: number): Known<Reading> {
+  const wiredOhm = at.point.bleeder?.ohm ?? Infinity;
+  if (causes !== allCauses || bleederOhm !== undefined) return reckon(at, causes, bleederOhm ?? wiredOhm);
+  const reading = known.get(at) ?? reckon(at, causes, wiredOhm);
+  known.set(at, reading);
+  return reading;
 }

@@ -15,7 +15,8 @@ export interface Reading {
   V: number;
   /** Of an optocoupler its LED's. */
   mA: number;
-  because: Quantity[];
+  /** The sum, put together only for a finding. */
+  because: () => Quantity[];
 }
 export type Known<T> = { is: T } | { missing: string };
 
@@ -25,7 +26,7 @@ const dark = (at: InputPlace): Reading => ({
   state: 'off',
   V: 0,
   mA: 0,
-  because: [quantity('supply-low', at.volts.minV, 'V', at.volts.tolerancePath)],
+  because: () => [quantity('supply-low', at.volts.minV, 'V', at.volts.tolerancePath)],
 });
 
 function because(at: InputPlace, solved: Solved): Quantity[] {
@@ -52,7 +53,7 @@ const isBlocked = (at: InputPlace): boolean =>
  * The worst reading that the stated data allow. Where something is not stated the answer stands only if it does not
  * hang on it: already failing without the cable and with the least current, or passing with the most.
  */
-export function onState(at: InputPlace, bleederOhm = at.point.bleeder?.ohm): Known<Reading> {
+function reckon(at: InputPlace, bleederOhm: number | undefined): Known<Reading> {
   const { volts, point, path, io, ioPath } = at;
   const strange = notASwitch(at);
   if (strange !== undefined) return { missing: strange };
@@ -67,7 +68,7 @@ export function onState(at: InputPlace, bleederOhm = at.point.bleeder?.ohm): Kno
         state: limits.state(solved.V, sensed(solved)),
         V: solved.V,
         mA: sensed(solved),
-        because: [...because(at, solved), ...limits.on],
+        because: () => [...because(at, solved), ...limits.on],
       };
     })
     .sort((a, b) => rank[a.state] - rank[b.state]);
@@ -81,6 +82,16 @@ export function onState(at: InputPlace, bleederOhm = at.point.bleeder?.ohm): Kno
   if (worst.state === 'on' && !point.cable) return { missing: `${path}.cable` };
   if (worst.state === 'on' && !volts.known) return { missing: volts.tolerancePath };
   return { is: worst };
+}
+
+const known = new WeakMap<InputPlace, Known<Reading>>();
+
+/** As wired, or with another resistor across the input. */
+export function onState(at: InputPlace, bleederOhm?: number): Known<Reading> {
+  if (bleederOhm !== undefined) return reckon(at, bleederOhm);
+  const reading = known.get(at) ?? reckon(at, at.point.bleeder?.ohm);
+  known.set(at, reading);
+  return reading;
 }
 
 /** Volts the supply must keep at its low limit so that the input is on, with this cable and these devices. */

@@ -1,6 +1,7 @@
 /** An input whose device has switched must read as on: never on, or in the range where nobody can say. */
 import { say } from '../../panel/says';
 import { found, missing, quantity, titleOf, type Outcome, type RuleAt } from '../rule';
+import { offerBleeder } from './bleederFor';
 import { branches } from './fieldDevices';
 import { atLoop, type InputPlace } from './inputPlace';
 import { offState } from './offState';
@@ -8,21 +9,34 @@ import { neededV, onState, type Known, type Reading } from './onState';
 
 const basis = 'IEC 61131-2 table 7; the loop solved at the low supply, cable at 70 °C';
 
-/** `variant` tells which of the two positions of the device is meant. */
-function finding(id: string, at: InputPlace, reading: Reading, variant?: 'open'): Outcome {
-  const least = variant === undefined ? neededV(at) : undefined;
+const where = ({ where: place, point }: InputPlace, { V }: Reading) => ({
+  harm: 'fails' as const,
+  where: place,
+  params: { terminal: point.terminal, V },
+});
+
+function whileOn(id: string, at: InputPlace, reading: Reading): Outcome {
+  const least = neededV(at);
   return found(id, {
-    harm: 'fails',
-    where: at.where,
-    ...(variant !== undefined && { variant }),
-    params: { terminal: at.point.terminal, V: reading.V },
+    ...where(at, reading),
     because: [
-      ...reading.because,
+      ...reading.because(),
       ...(least === undefined ? [] : [quantity('supply-needed', least, 'V', 'solved loop')]),
     ],
     ...(least !== undefined && {
       remedy: { says: say('finding.remedy.on', { V: least }), values: { V: least } },
     }),
+  });
+}
+
+/** Leakage and cable together; where one alone explains it, its own rule says so instead. */
+function whileOff(id: string, at: InputPlace, reading: Reading): Outcome {
+  const { because, ...offer } = offerBleeder(at);
+  return found(id, {
+    ...where(at, reading),
+    variant: 'open',
+    because: [...reading.because(), ...because],
+    ...offer,
   });
 }
 
@@ -43,7 +57,7 @@ export const neverOn: RuleAt<'point'> = {
   check: (place, context) =>
     place.module
       ? atLoop(place, context, (at) => [
-          known(onState(at), ['off'], (reading) => finding('input.never-on', at, reading)),
+          known(onState(at), ['off'], (reading) => whileOn('input.never-on', at, reading)),
         ])
       : // A group or module that the panel does not have: nobody can say what this point is.
         [missing(`${place.path}.group`)],
@@ -56,7 +70,7 @@ export const neverOff: RuleAt<'point'> = {
   appliesTo: 'point',
   check: (place, context) =>
     atLoop(place, context, (at) => [
-      known(offState(at), ['on'], (reading) => finding('input.never-off', at, reading, 'open')),
+      known(offState(at), ['on'], (reading) => whileOff('input.never-off', at, reading)),
     ]),
 };
 
@@ -67,8 +81,8 @@ export const undefinedRange: RuleAt<'point'> = {
   appliesTo: 'point',
   check: (place, context) =>
     atLoop(place, context, (at) => [
-      known(onState(at), ['undefined'], (reading) => finding('input.undefined', at, reading)),
-      known(offState(at), ['undefined'], (reading) => finding('input.undefined', at, reading, 'open')),
+      known(onState(at), ['undefined'], (reading) => whileOn('input.undefined', at, reading)),
+      known(offState(at), ['undefined'], (reading) => whileOff('input.undefined', at, reading)),
     ]),
 };
 
@@ -89,7 +103,7 @@ export const twoWireInSeries: RuleAt<'point'> = {
             harm: 'fails',
             where: at.where,
             params: { count, V: reading.V },
-            because: reading.because,
+            because: reading.because(),
             remedy: { says: say('finding.input.two-wire-in-series.remedy') },
           }),
         ),

@@ -68,6 +68,8 @@ export const inputs = {
   'finding.input.not-saturated.title': 'Optocoupler does not switch through',
   'finding.input.not-saturated':
     'The aged optocoupler carries {has} mA at the lowest supply. It must carry {needs} mA.',
+  'finding.input.not-saturated.remedy':
+    'Give the LED {mA} mA or more: a higher supply or a smaller series resistor.',
   'finding.input.earth-fault-on.title': 'Earth fault reads as on',
   'finding.input.earth-fault-on': 'One earth fault on wire {wire} reads as on, since {supply} is earthed.',
 } as const;

@@ -69,6 +69,8 @@ export const inputs = {
   'finding.input.not-saturated.title': 'El optoacoplador no conmuta del todo',
   'finding.input.not-saturated':
     'El optoacoplador envejecido lleva {has} mA con la alimentación más baja. Debe llevar {needs} mA.',
+  'finding.input.not-saturated.remedy':
+    'Dé al LED {mA} mA o más: una alimentación más alta o una resistencia en serie menor.',
   'finding.input.earth-fault-on.title': 'Un fallo a tierra se lee como activa',
   'finding.input.earth-fault-on':
     'Un fallo a tierra en el hilo {wire} se lee como activa, pues {supply} está puesta a tierra.',
