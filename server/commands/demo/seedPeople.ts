@@ -2,13 +2,8 @@
 import { v7 } from 'uuid';
 import { hashPassword } from '../../features/people/password';
 import type { Services } from '../../services';
+import type { DemoIds } from './demoActor';
 import { demoPassword, demoPeople, demoSites, type DemoSite } from './people';
-
-export interface DemoIds {
-  sites: Record<DemoSite, string>;
-  /** By the part of their address before the @. */
-  people: Map<string, string>;
-}
 
 async function seedSites(services: Services): Promise<Record<DemoSite, string>> {
   const ids = { waterWorks: v7(), packaging: v7() };
