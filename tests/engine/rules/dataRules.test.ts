@@ -1,69 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { checkWiring } from '../../../shared/rules/checkWiring';
-import { cable, dcInput, inputPanel, inputPoint, module, panelOf } from './inputPanel';
-import { noCable, noTolerance, twoWire, unknownSupply, without, type Case } from './inputParts';
+import { dataCases } from './cases/data';
+import { cable, dcInput, inputPanel, panelOf } from './inputPanel';
+import { noCable, noTolerance, twoWire, unknownSupply } from './inputParts';
 import { verdict } from './verdict';
 
-const two = (more: Parameters<typeof inputPoint>[0]) =>
-  panelOf({
-    points: [inputPoint(), inputPoint({ address: 'DI.02', terminal: 'DI:2', wire: 'W2', ...more })],
-  });
-const spare = (more: Parameters<typeof inputPoint>[0] = {}) =>
-  panelOf({ points: [without(inputPoint({ spare: true, ...more }), 'cable')] });
-
-const cases: Case[] = [
-  { rule: 'data.duplicate-address', name: 'twice', panel: two({ address: 'DI.01' }), expected: 'doubt' },
-  { rule: 'data.duplicate-address', name: 'once', panel: two({}), expected: 'ok' },
-  { rule: 'data.duplicate-terminal', name: 'twice', panel: two({ terminal: 'DI:1' }), expected: 'doubt' },
-  { rule: 'data.duplicate-terminal', name: 'once', panel: two({}), expected: 'ok' },
-  { rule: 'data.duplicate-wire', name: 'twice', panel: two({ wire: 'W1' }), expected: 'doubt' },
-  { rule: 'data.duplicate-wire', name: 'once', panel: two({}), expected: 'ok' },
-  {
-    rule: 'data.unused-terminal',
-    name: 'one that no row names',
-    panel: panelOf({ modules: [module(dcInput(), { terminals: ['DI:1', 'DI:2', 'DI:C'] })] }),
-    expected: 'doubt',
-  },
-  { rule: 'data.unused-terminal', name: 'all named', panel: panelOf(), expected: 'ok' },
-  {
-    rule: 'data.unused-terminal',
-    name: 'one that a conductor names',
-    panel: panelOf({
-      modules: [module(dcInput(), { terminals: ['DI:1', 'DI:2', 'DI:C'] })],
-      points: [inputPoint({ conductors: [{ role: 'plus', wire: 'W9', terminal: 'DI:2' }] })],
-    }),
-    expected: 'ok',
-  },
-  {
-    rule: 'data.unused-terminal',
-    name: 'terminals not stated',
-    panel: panelOf({ modules: [without(module(dcInput()), 'terminals')] }),
-    expected: 'nothing',
-  },
-  {
-    rule: 'data.spare-connected',
-    name: 'with a cable',
-    panel: spare({ bleeder: { ohm: 1000, W: 1 } }),
-    expected: 'doubt',
-  },
-  {
-    rule: 'data.spare-connected',
-    name: 'with foreign voltage',
-    panel: spare({ otherSupply: 'S2' }),
-    expected: 'doubt',
-  },
-  {
-    rule: 'data.spare-connected',
-    name: 'with a named contact',
-    panel: spare({ device: { kind: 'contact', tag: 'B1' } }),
-    expected: 'doubt',
-  },
-  { rule: 'data.spare-connected', name: 'empty', panel: spare(), expected: 'ok' },
-  { rule: 'data.spare-connected', name: 'not spare', panel: panelOf(), expected: 'nothing' },
-];
-
 describe('rules of the data', () => {
-  test.each(cases)('$rule: $name → $expected', ({ rule, panel, expected }) => {
+  test.each(dataCases)('$rule: $name → $expected', ({ rule, panel, expected }) => {
     expect(verdict(panel, rule)).toBe(expected);
   });
 });
