@@ -100,6 +100,7 @@ export const office = {
   'office.points.group': 'Group {group}, supply {supply}: {n} of {of}',
   'office.points.show': 'Show the points of {module}',
   'office.points.hide': 'Hide the points of {module}',
+  'office.point.loop': 'Loop of {address}',
   'office.point.address': 'Address',
   'office.point.terminal': 'Terminal',
   'office.point.group': 'Group',

@@ -102,6 +102,7 @@ export const office = {
   'office.points.group': 'Grupo {group}, alimentación {supply}: {n} de {of}',
   'office.points.show': 'Mostrar los puntos de {module}',
   'office.points.hide': 'Ocultar los puntos de {module}',
+  'office.point.loop': 'Lazo de {address}',
   'office.point.address': 'Dirección',
   'office.point.terminal': 'Borne',
   'office.point.group': 'Grupo',

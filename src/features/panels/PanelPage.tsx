@@ -61,7 +61,7 @@ function PanelSheet({ panel, asOf }: { panel: PanelView; asOf: number }) {
       </SheetSection>
       <IsolationSection panel={draft} version={`${panel.id} ${panel.draft.version}`} />
       <SheetSection title={t('office.points')}>
-        <PointsTable panel={draft} />
+        <PointsTable panel={draft} findings={findings.data?.findings} />
       </SheetSection>
       <SheetSection title={t('office.revisions')} note={t('office.revisions.note')}>
         <RevisionsTable panel={panel.id} revisions={panel.revisions} />

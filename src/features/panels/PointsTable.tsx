@@ -1,10 +1,12 @@
 import { useState } from 'react';
+import type { FindingView } from '../../../shared/api/panels';
 import type { Panel, Point } from '../../../shared/panel/panelSchema';
 import { Button } from '../../components/Button';
 import { Table, type Column } from '../../components/Table';
 import { Tag } from '../../components/Tag';
 import { TextField } from '../../components/form/TextField';
 import { useWords } from '../../components/words';
+import { PointLoop } from './PointLoop';
 
 // A panel may hold 20,000 points: the table draws what a person can read and grows on request.
 const pageSize = 100;
@@ -14,14 +16,34 @@ const matches = (point: Point, filter: string) =>
     .toLowerCase()
     .includes(filter.toLowerCase());
 
-/** The points of a panel, in their order, with a filter. */
-export function PointsTable({ panel }: { panel: Panel }) {
+interface PointsTableProps {
+  panel: Panel;
+  /** Those known so far: they are marked in the loop of a point. */
+  findings?: readonly FindingView[] | undefined;
+}
+
+/** The points of a panel, in their order, with a filter; each opens its loop. */
+export function PointsTable({ panel, findings = [] }: PointsTableProps) {
   const { t } = useWords();
   const [filter, setFilter] = useState('');
   const [shown, setShown] = useState(pageSize);
+  const [looked, setLooked] = useState<Point>();
   const points = panel.points.filter((point) => matches(point, filter));
   const columns: Column<Point & { index: number }>[] = [
-    { head: t('office.point.address'), className: 'md:w-32', cell: (point) => <Tag>{point.address}</Tag> },
+    {
+      head: t('office.point.address'),
+      className: 'md:w-32',
+      cell: (point) => (
+        <button
+          type="button"
+          aria-label={t('office.point.loop', { address: point.address })}
+          className="min-h-11 cursor-pointer"
+          onClick={() => setLooked(point)}
+        >
+          <Tag>{point.address}</Tag>
+        </button>
+      ),
+    },
     { head: t('office.point.terminal'), className: 'md:w-28', cell: (point) => <Tag>{point.terminal}</Tag> },
     { head: t('office.point.group'), className: 'md:w-28', cell: (point) => point.group },
     { head: t('office.point.what'), cell: (point) => point.description },
@@ -59,6 +81,9 @@ export function PointsTable({ panel }: { panel: Panel }) {
         rows={points.slice(0, shown).map((point, index) => ({ ...point, index }))}
         keyOf={(point) => String(point.index)}
       />
+      {looked && (
+        <PointLoop panel={panel} point={looked} findings={findings} onClose={() => setLooked(undefined)} />
+      )}
       {points.length > shown && (
         <Button className="mt-4" onClick={() => setShown(shown + pageSize)}>
           {t('app.more')}

@@ -48,7 +48,7 @@ function RevisionSheet({ panel, revision }: { panel: string; revision: RevisionV
       </SheetSection>
       <IsolationSection panel={issued} version={revision.digest} />
       <SheetSection title={t('office.points')}>
-        <PointsTable panel={issued} />
+        <PointsTable panel={issued} findings={findings.data?.findings} />
       </SheetSection>
     </SheetPage>
   );
