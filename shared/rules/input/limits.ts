@@ -66,14 +66,14 @@ function ofOpto(io: Io<'opto-input'>, ioPath: string): Limits {
   };
 }
 
-// Sixteen points share a module's limits.
-const known = new WeakMap<InputPlace['io'], Limits>();
+// Sixteen points share a module's limits; two modules made alike may share one object, so the path counts too.
+const known = new WeakMap<InputPlace['io'], Map<string, Limits>>();
 
 /** Undefined for a custom input without thresholds and for a declared type that the table does not hold at these volts. */
 export function limitsOf({ io, ioPath }: Pick<InputPlace, 'io' | 'ioPath'>): Limits | undefined {
-  const reckoned = known.get(io);
+  const reckoned = known.get(io)?.get(ioPath);
   if (reckoned) return reckoned;
   const limits = io.kind === 'digital-input' ? ofDigital(io, ioPath) : ofOpto(io, ioPath);
-  if (limits) known.set(io, limits);
+  if (limits) known.set(io, (known.get(io) ?? new Map<string, Limits>()).set(ioPath, limits));
   return limits;
 }
