@@ -1,10 +1,11 @@
-/** The resistor across an input that leads a sensor's leakage away: measured before it is fitted. */
+/** The resistor that leads a leakage away, across an input or across an output's load: measured before it is fitted. */
 import { say } from '../../../panel/says';
 import { choice } from '../../asks';
 import type { Facts, PointFacts } from '../../facts';
 import { inThousandths } from '../../inThousandths';
 import { makeStep } from '../../makeStep';
 import type { Step } from '../../types';
+import { otherPoles } from './poles';
 
 // E24 values are made to 5 % (IEC 60063).
 const tolerance = 0.05;
@@ -18,11 +19,18 @@ function resistorFor(facts: Facts, { point }: PointFacts): { ohm: number; W: num
   return { ohm: values.ohm, W: values.W ?? '?' };
 }
 
+/** Across the input it goes to the common; across a load to the pole the load goes back to, never across the output. */
+function acrossWhat({ group, module, supply }: PointFacts): { what: 'input' | 'load'; far: string } {
+  if (module.io.kind !== 'digital-output') return { what: 'input', far: group.terminal };
+  return { what: 'load', far: supply ? otherPoles(group, supply).join(', ') : '?' };
+}
+
 export function bleeder(facts: Facts, worked: PointFacts): Step[] {
   const resistor = resistorFor(facts, worked);
   if (!resistor) return [];
   const { address, terminal } = worked.point;
   const { ohm, W } = resistor;
+  const { what, far } = acrossWhat(worked);
   const common = { stage: 'wire', family: 'bleeder', where: { point: address, terminal } } as const;
   return [
     makeStep({
@@ -41,9 +49,11 @@ export function bleeder(facts: Facts, worked: PointFacts): Step[] {
     makeStep({
       ...common,
       id: `wire.${address}.bleeder`,
-      title: say('checklist.wire.bleeder', { ohm, terminal, common: worked.group.terminal }),
-      detail: [say('checklist.wire.bleeder.across')],
-      ask: choice(['bleeder-across-input'], ['bleeder-elsewhere']),
+      title: say('checklist.wire.bleeder', { ohm, terminal, common: far }),
+      detail: [
+        say(what === 'input' ? 'checklist.wire.bleeder.across' : 'checklist.wire.bleeder.across-load'),
+      ],
+      ask: choice([`bleeder-across-${what}`], ['bleeder-elsewhere']),
       picture: { kind: 'loop', point: address },
     }),
   ];

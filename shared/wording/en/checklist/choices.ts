@@ -15,6 +15,7 @@ export const choices = {
   'checklist.choice.band-on-minus': 'Band on minus',
   'checklist.choice.band-on-plus': 'Band on plus',
   'checklist.choice.bleeder-across-input': 'Across the input',
+  'checklist.choice.bleeder-across-load': 'Across the load',
   'checklist.choice.bleeder-elsewhere': 'Somewhere else, or not fitted',
   'checklist.choice.both-ends-off': 'Both ends are off',
   'checklist.choice.common-right': 'It is on that pole',

@@ -33,6 +33,7 @@ export const wiring = {
   'checklist.wire.bleeder.watts': 'It must be {ohm} ohm and {W} W.',
   'checklist.wire.bleeder': 'Fit the {ohm} ohm resistor from {terminal} to {common}.',
   'checklist.wire.bleeder.across': 'It goes across the input, not the sensor.',
+  'checklist.wire.bleeder.across-load': 'It goes across the load, not the output.',
   'checklist.wire.tug': 'Tug each wire at {terminal}.',
   'checklist.wire.label': 'Read the label of wire {wire} at {terminal}.',
   'checklist.role.signal': 'signal wire',

@@ -15,6 +15,7 @@ export const choices = {
   'checklist.choice.band-on-minus': 'Banda en negativo',
   'checklist.choice.band-on-plus': 'Banda en positivo',
   'checklist.choice.bleeder-across-input': 'En la entrada',
+  'checklist.choice.bleeder-across-load': 'En la carga',
   'checklist.choice.bleeder-elsewhere': 'En otro lugar, o sin montar',
   'checklist.choice.both-ends-off': 'Los dos extremos están sueltos',
   'checklist.choice.common-right': 'Está en ese polo',

@@ -38,6 +38,7 @@ export const wiring = {
   'checklist.wire.bleeder.watts': 'Debe ser de {ohm} ohmios y {W} W.',
   'checklist.wire.bleeder': 'Monte la resistencia de {ohm} ohmios de {terminal} a {common}.',
   'checklist.wire.bleeder.across': 'Va en la entrada, no en el sensor.',
+  'checklist.wire.bleeder.across-load': 'Va en la carga, no en la salida.',
   'checklist.wire.tug': 'Tire de cada hilo en {terminal}.',
   'checklist.wire.label': 'Lea la etiqueta del hilo {wire} en {terminal}.',
   'checklist.role.signal': 'el hilo de señal',
