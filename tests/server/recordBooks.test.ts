@@ -101,6 +101,16 @@ describe('the PDF', () => {
     expect(made.toString('latin1')).toContain('/Lang (es)');
   });
 
+  it.each([
+    ['IEC 60204-1', '595.28 841.89'],
+    ['NFPA 79', '612 792'],
+  ] as const)('of a panel after %s is on paper of that place', async (practice, size) => {
+    const panel = { ...widePanel(2), practice };
+    const made = await recordPdf({ ...sealedSample, document: sampleRecord(2), panel });
+    expect(made.toString('latin1')).toContain(`/MediaBox [0 0 ${size}]`);
+    expect(textOf(made)).toContain('2222222222');
+  });
+
   it('of 500 points takes less than 5 s of work and 5 MB', async () => {
     const document = sampleRecord(500);
     const begun = process.cpuUsage();

@@ -1,4 +1,4 @@
-/** The PDF of a sealed record: A4, embedded faces, tagged, in the language it was signed in, no content from outside. */
+/** The PDF of a sealed record: A4 or Letter, embedded faces, tagged, in the language it was signed in, no content from outside. */
 import PDFDocument from 'pdfkit';
 import { exceptionsSection } from './exceptionsSection';
 import { headSection } from './headSection';
@@ -37,7 +37,8 @@ export async function recordPdf(record: RecordToPrint): Promise<Buffer> {
   const { document, number, digest, sealedAt } = record;
   const words = recordWords(document);
   const pdf = new PDFDocument({
-    size: 'A4',
+    // The paper of the place whose rules the panel follows: common practice, no source.
+    size: record.panel.practice === 'NFPA 79' ? 'LETTER' : 'A4',
     margin,
     // Text is placed by hand: without this a line near the foot would begin a page of its own.
     margins: { top: margin, left: margin, right: margin, bottom: 0 },
