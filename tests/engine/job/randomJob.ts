@@ -74,6 +74,20 @@ function readLive(turn: Turn): void {
   if (step) turn.job.writeDeaf(turn.device, 'answer', answerBody(step, { kind: 'reading', value: 118 }));
 }
 
+/** All that this person answers alone in Prove dead, at one go, and a terminal after it. */
+function proveAgain(turn: Turn): void {
+  for (const step of turn.job.checklist.steps)
+    if ((step.stage === 'prove-dead' && step.by === 'each') || step.personal) write(turn, step);
+}
+
+/** The lock comes off and goes on again: what was read before is worth nothing. */
+function relock(turn: Turn): void {
+  const isolator = isolatorOf(turn);
+  const lock = ownNumber(turn, isolator);
+  turn.job.writeDeaf(turn.device, 'lock-off', { isolator, lock });
+  turn.job.writeDeaf(turn.device, 'lock-on', { isolator, lock });
+}
+
 function round(reason: BodyOf<'round-started'>['reason']) {
   return ({ job, device, pick }: Turn): void => {
     const point = at(job.checklist.scope, pick) ?? '';
@@ -178,6 +192,8 @@ const acts: readonly ((turn: Turn) => void)[] = [
   ({ job, person }) => {
     countersign(job, person);
   },
+  relock,
+  proveAgain,
 ];
 
 export const actCount = acts.length;
