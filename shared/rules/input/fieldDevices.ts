@@ -9,7 +9,7 @@ export interface Fitted {
 }
 
 // Every input rule asks for them: put together once a point.
-const known = new WeakMap<InputPlace['point'], Fitted[][]>();
+const known = new WeakMap<InputPlace['point'], { strings: Fitted[][]; all: Fitted[] }>();
 
 function reckon({ point, path }: Pick<InputPlace, 'point' | 'path'>): Fitted[][] {
   const series = (point.series ?? []).map((device, n) => ({ device, path: `${path}.series.${n}` }));
@@ -17,14 +17,19 @@ function reckon({ point, path }: Pick<InputPlace, 'point' | 'path'>): Fitted[][]
   return [[{ device: point.device, path: `${path}.device` }, ...series], ...parallel];
 }
 
-/** The strings that can switch the input on: the point's device with those in series, and each one in parallel. */
-export function branches(at: Pick<InputPlace, 'point' | 'path'>): Fitted[][] {
-  const strings = known.get(at.point) ?? reckon(at);
-  known.set(at.point, strings);
-  return strings;
+function fitted(at: Pick<InputPlace, 'point' | 'path'>) {
+  const reckoned = known.get(at.point);
+  if (reckoned) return reckoned;
+  const strings = reckon(at);
+  const made = { strings, all: strings.flat() };
+  known.set(at.point, made);
+  return made;
 }
 
-export const fittedDevices = (at: Pick<InputPlace, 'point' | 'path'>): Fitted[] => branches(at).flat();
+/** The strings that can switch the input on: the point's device with those in series, and each one in parallel. */
+export const branches = (at: Pick<InputPlace, 'point' | 'path'>): Fitted[][] => fitted(at).strings;
+
+export const fittedDevices = (at: Pick<InputPlace, 'point' | 'path'>): Fitted[] => fitted(at).all;
 
 /** Current into the terminal: the common is at 0 V (IEC 61131-2 calls such an input sinking). */
 export const isSinking = ({ group }: Pick<InputPlace, 'group'>): boolean => group.common === 'negative';
