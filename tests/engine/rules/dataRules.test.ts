@@ -1,7 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { checkWiring } from '../../../shared/rules/checkWiring';
 import { dataCases } from './cases/data';
-import { cable, dcInput, inputPanel, panelOf } from './inputPanel';
+import type { panelOf } from './inputPanel';
+import { cable, dcInput, inputPanel } from './inputPanel';
 import { noCable, noTolerance, twoWire, unknownSupply } from './inputParts';
 import { verdict } from './verdict';
 
