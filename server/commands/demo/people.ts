@@ -31,7 +31,7 @@ export const demoSites = {
     },
   },
   packaging: {
-    name: 'Halden Quay Packaging',
+    name: 'Quayside Packaging',
     settings: {
       emergencyNumber: '112',
       musterPoint: 'Loading dock, south side',

@@ -17,7 +17,10 @@ export function FieldPage({ header, banner, children, answer, footer }: FieldPag
     <div className="field-page bg-paper text-[1.125rem] text-ink">
       <header className="field-head">{header}</header>
       <main className="field-main">
-        <div className="field-words">{children}</div>
+        {/* With an answer below, the words scroll under it: by keyboard too. */}
+        <div className="field-words" tabIndex={answer ? 0 : undefined}>
+          {children}
+        </div>
         {answer && <div className="field-answer">{answer}</div>}
       </main>
       <footer className="field-foot">

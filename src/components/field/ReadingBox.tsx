@@ -1,4 +1,5 @@
 import { useRef, useEffect } from 'react';
+import { useWords } from '../words';
 import { padPress, type PadKey } from './padPress';
 
 interface ReadingBoxProps {
@@ -8,6 +9,8 @@ interface ReadingBoxProps {
   unit: string;
   describedBy?: string;
   invalid?: boolean;
+  /** Offers the change of sign, for quantities that have a direction. */
+  minus?: boolean;
   onChange: (value: string) => void;
   onEnter: () => void;
 }
@@ -22,9 +25,11 @@ export function ReadingBox({
   unit,
   describedBy,
   invalid,
+  minus = false,
   onChange,
   onEnter,
 }: ReadingBoxProps) {
+  const { t } = useWords();
   const field = useRef<HTMLInputElement>(null);
   // Our own pad does the typing: the phone's keyboard stays down.
   useEffect(() => {
@@ -32,6 +37,18 @@ export function ReadingBox({
   }, []);
   return (
     <div className="flex items-center border-[3px] border-ink bg-sheet px-3.5">
+      {minus && (
+        <button
+          type="button"
+          aria-label={t('field.pad.minus')}
+          className="-ml-3.5 mr-3 min-h-[3.5rem] min-w-[3.5rem] cursor-pointer self-stretch border-0 border-r-2 border-edge bg-sheet text-[1.35rem] font-bold text-ink active:bg-ink active:text-paper"
+          onClick={() => {
+            onChange(padPress(value, '-'));
+          }}
+        >
+          ±
+        </button>
+      )}
       <input
         ref={field}
         id={id}

@@ -21,7 +21,7 @@ export const store = {
   'device.store.ready.storage.accepted':
     'The browser may delete what is stored when space runs out. You accepted that.',
   'device.store.ready.storage.ask': 'The browser has not promised to keep what is stored.',
-  'device.store.ready.storage.ask.button': 'Ask it to keep it',
+  'device.store.ready.storage.ask.button': 'Ask the browser to keep it',
   'device.store.ready.storage.warn':
     'The browser refused. It may delete unsent answers when space runs out. Send often.',
   'device.store.ready.storage.warn.button': 'Work with that risk',

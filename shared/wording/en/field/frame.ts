@@ -25,6 +25,7 @@ export const frame = {
   'field.title.round': 'Round',
   'field.title.job': 'Job',
   'field.pad.wipe': 'Wipe',
+  'field.pad.minus': 'Change the sign',
   'field.unsent.none': 'All answers are sent.',
   'field.unsent.some':
     'Saved on this phone. {n, plural, one {# answer not sent yet.} other {# answers not sent yet.}}',

@@ -25,6 +25,7 @@ export const frame = {
   'field.title.round': 'Vuelta',
   'field.title.job': 'Trabajo',
   'field.pad.wipe': 'Borrar',
+  'field.pad.minus': 'Cambiar el signo',
   'field.unsent.none': 'Todas las respuestas están enviadas.',
   'field.unsent.some':
     'Guardado en este teléfono. {n, plural, one {# respuesta sin enviar.} other {# respuestas sin enviar.}}',

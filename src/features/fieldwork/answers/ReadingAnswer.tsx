@@ -70,6 +70,7 @@ export function ReadingAnswer({ step }: { step: StepOf<'reading'> }) {
             value={typed}
             unit={unitSign(ask.unit, t)}
             describedBy={limitId}
+            minus={ask.unit === 'V DC' || (ask.low ?? 0) < 0}
             onChange={setTyped}
             onEnter={() => void save()}
           />
@@ -84,13 +85,7 @@ export function ReadingAnswer({ step }: { step: StepOf<'reading'> }) {
             />
           )}
           <WatchedReadings step={step} onWatched={watch} />
-          <NumberPad
-            value={typed}
-            onChange={setTyped}
-            decimal={!whole}
-            minus={ask.unit === 'V DC' || (ask.low ?? 0) < 0}
-            words={t('field.reading.pad')}
-          />
+          <NumberPad value={typed} onChange={setTyped} decimal={!whole} words={t('field.reading.pad')} />
         </>
       }
       primary={

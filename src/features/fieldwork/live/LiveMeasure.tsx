@@ -44,18 +44,14 @@ export function LiveMeasure({ live, onBack }: { live: LiveReading; onBack: () =>
             value={typed}
             unit={unit}
             describedBy={`${id}-limit`}
+            minus={live.ask.unit === 'V DC'}
             onChange={setTyped}
             onEnter={() => void save()}
           />
           <p id={`${id}-limit`} className="m-0 text-[0.95rem] text-muted">
             {limitWords(live.ask, t)}
           </p>
-          <NumberPad
-            value={typed}
-            onChange={setTyped}
-            minus={live.ask.unit === 'V DC'}
-            words={t('field.reading.pad')}
-          />
+          <NumberPad value={typed} onChange={setTyped} words={t('field.reading.pad')} />
           <NotSaved code={failed} />
         </>
       }
