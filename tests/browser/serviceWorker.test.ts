@@ -31,6 +31,8 @@ async function enterPin(page: Page): Promise<void> {
   await page.getByRole('button', { name: mara.name }).click();
   await page.getByLabel(t('field.pin.yours')).fill(pin);
   await button(page, 'field.pin.open').click();
+  // A page that is closed before the PIN was looked at has had a wrong try: the next would have to wait.
+  await page.getByLabel(t('field.pin.yours')).waitFor({ state: 'hidden' });
 }
 
 const workerInControl = (page: Page) =>
