@@ -15,7 +15,9 @@ const modules = import.meta.glob<Record<string, unknown>>('../../server/commands
 /** Every panel that a module of the demo exports, or makes when called without arguments. */
 function demoPanels(): Panel[] {
   const exported = Object.values(modules).flatMap((module) => Object.values(module));
-  const made = exported.map((each) => (typeof each === 'function' && each.length === 0 ? each() : each));
+  const made = exported.map((each) =>
+    typeof each === 'function' && each.length === 0 ? (each as () => unknown)() : each,
+  );
   return made.flatMap((each) => {
     const parsed = panelSchema.safeParse(each);
     return parsed.success ? [parsed.data] : [];

@@ -23,6 +23,10 @@ const perAddress: Tries = {
   key: (request) => request.ip ?? 'unknown',
 };
 
+/** passport and the session store call back with whatever went wrong. */
+const asError = (error: unknown): Error =>
+  error instanceof Error ? error : new Error('sign-in failed', { cause: error });
+
 const signedIn = (
   authenticator: passport.Authenticator,
   request: Request,
@@ -30,7 +34,7 @@ const signedIn = (
 ): Promise<Express.User | false> =>
   new Promise((resolve, reject) => {
     const handler = authenticator.authenticate('local', (error: unknown, user: Express.User | false) => {
-      if (error) reject(error);
+      if (error) reject(asError(error));
       else resolve(user);
     }) as RequestHandler;
     void handler(request, response, reject);
@@ -39,11 +43,11 @@ const signedIn = (
 /** passport regenerates the session on logIn, so a session id from before sign-in is worth nothing. */
 const openSession = (request: Request, user: Express.User): Promise<void> =>
   new Promise((resolve, reject) =>
-    request.logIn(user, (error: unknown) => (error ? reject(error) : resolve())),
+    request.logIn(user, (error: unknown) => (error ? reject(asError(error)) : resolve())),
   );
 const closeSession = (request: Request): Promise<void> =>
   new Promise((resolve, reject) =>
-    request.session.destroy((error: unknown) => (error ? reject(error) : resolve())),
+    request.session.destroy((error: unknown) => (error ? reject(asError(error)) : resolve())),
   );
 
 export function sessionRoutes(

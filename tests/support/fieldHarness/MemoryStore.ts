@@ -87,7 +87,7 @@ export class MemoryStore implements DeviceStore {
       previous: last ? entryHash(last) : null,
       seen,
       kind,
-      body: body as Record<string, unknown>,
+      body,
       pack: this.pack.digest,
       at: new Date().toISOString(),
       signature: 'A'.repeat(86),

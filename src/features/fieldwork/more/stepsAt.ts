@@ -1,16 +1,20 @@
 /** The steps of a terminal, point or isolator that a person names, for *Jump to terminal*. */
 import type { Pack } from '../../../../shared/api/jobs';
 import type { Step } from '../../../../shared/checklist/types';
+import type { Where } from '../../../../shared/rules/finding';
 import type { Panel } from '../../../../shared/panel/panelSchema';
 
 const bare = (name: string): string => name.replace(/\s/g, '').toUpperCase();
+
+const placeNames = (where: Where = {}): string[] =>
+  Object.values({ ...where }).filter((name) => name !== undefined);
 
 /** Every name under which a step's place may be typed: its tags, and its point's address, terminals and wires. */
 function namesOf(step: Step, panel: Panel): string[] {
   const point = panel.points.find(({ address }) => address === step.where?.point);
   const dead = step.ask.kind === 'reading' ? step.ask.dead : undefined;
   return [
-    ...Object.values(step.where ?? {}),
+    ...placeNames(step.where),
     ...(point ? [point.terminal, point.wire, point.device.tag ?? ''] : []),
     ...(point?.conductors ?? []).flatMap(({ terminal, wire }) => [terminal, wire]),
     ...(dead ? [dead.terminal, dead.second] : []),
