@@ -6,8 +6,7 @@ import type { Panel } from '../../../../shared/panel/panelSchema';
 
 const bare = (name: string): string => name.replace(/\s/g, '').toUpperCase();
 
-const placeNames = (where: Where = {}): string[] =>
-  Object.values({ ...where }).filter((name) => name !== undefined);
+const placeNames = (where: Where = {}): string[] => Object.values({ ...where });
 
 /** Every name under which a step's place may be typed: its tags, and its point's address, terminals and wires. */
 function namesOf(step: Step, panel: Panel): string[] {
