@@ -64,7 +64,7 @@ export const jobPreview = z.object({
   waits: panelCheck.shape.isolation.shape.waits,
   /** Findings in the scope; `needsAcceptance` until the revision or the job accepts them. */
   findings: z.array(placedFinding.extend({ needsAcceptance: z.boolean() })),
-  /** How many checks ran in the scope, and those that could not: "no findings" is never shown without them. */
+  /** How many checks ran on the panel, and those of the scope that could not: "no findings" is never shown without them. */
   checks: z.int(),
   couldNotRun: panelCheck.shape.couldNotRun,
   checklist: panelCheck.shape.checklist,

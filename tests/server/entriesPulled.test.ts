@@ -67,6 +67,35 @@ describe('after access has ended', () => {
   });
 });
 
+describe('more pushes at once than the server works on', () => {
+  it('are asked to come again, and lose nothing', async () => {
+    const log = await newLog();
+    log.add();
+    const holder = new Client({ connectionString: server.ownerUrl });
+    await holder.connect();
+    await holder.query('BEGIN');
+    await holder.query('SELECT 1 FROM job WHERE id = $1 FOR UPDATE', [log.job]);
+    const waiting = Array.from({ length: 60 }, () => push(log).then((answer) => answer));
+    await expect.poll(() => settled(waiting, 503), { timeout: 20_000 }).toBeGreaterThanOrEqual(20);
+    await holder.query('COMMIT');
+    await holder.end();
+    const answers = await Promise.all(waiting);
+    expect(new Set(answers.map(({ status }) => status))).toEqual(new Set([200, 503]));
+    const refused = answers.find(({ status }) => status === 503);
+    expect(refused?.headers['retry-after']).toBe('2');
+    expect(refused?.body.code).toBe('busy');
+    await push(log).expect(200);
+    expect(await stored(log)).toHaveLength(1);
+  });
+});
+
+/** How many of these have been answered with a status by now. */
+async function settled(answers: Promise<{ status: number }>[], status: number): Promise<number> {
+  const open = { status: 0 };
+  const now = await Promise.all(answers.map((each) => Promise.race([each, Promise.resolve(open)])));
+  return now.filter((each) => each.status === status).length;
+}
+
 describe('whose turn it is', () => {
   it('moves the job on when it is accepted', async () => {
     const log = await newLog();
