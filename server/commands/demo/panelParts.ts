@@ -187,10 +187,14 @@ const address = (module: string, number: number): string =>
 export function inputPoint({ module, number, group, description, device, lengthM }: Wired): Point {
   const wire = `${module}-${number}`;
   const threeWire = device.kind === 'pnp' || device.kind === 'push-pull';
+  // A sensor's own cable has the cores of IEC 60947-5-2: brown plus, black switched, blue minus.
+  const colours = threeWire
+    ? { plus: 'BN', signal: 'BK', minus: 'BU' }
+    : { plus: 'BN', signal: 'BU', minus: 'BU' };
   const core = (role: 'plus' | 'minus', strip: string) => ({
     role,
     wire: `${wire}${strip}`,
-    colour: 'BU',
+    colour: colours[role],
     terminal: `X2:${module}.${number}${strip}`,
   });
   return {
@@ -200,7 +204,7 @@ export function inputPoint({ module, number, group, description, device, lengthM
     description,
     group,
     conductors: [
-      { role: 'signal', wire, colour: 'BU', terminal: `${module}:${number}` },
+      { role: 'signal', wire, colour: colours.signal, terminal: `${module}:${number}` },
       core('plus', '+'),
       ...(threeWire ? [core('minus', '-')] : []),
     ],
