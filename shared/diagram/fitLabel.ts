@@ -6,8 +6,8 @@ const smallest = 10;
 
 export function fitTag(text: string, size: number, room: number | undefined): { text: string; size: number } {
   if (room === undefined || text.length * size * monoAdvance <= room) return { text, size };
-  const fitting = Math.max(smallest, room / (text.length * monoAdvance));
-  const letters = Math.max(2, Math.floor(room / (fitting * monoAdvance)));
-  const cut = text.length > letters ? `${text.slice(0, letters - 1)}…` : text;
-  return { text: cut, size: fitting };
+  const fitting = room / (text.length * monoAdvance);
+  if (fitting >= smallest) return { text, size: fitting };
+  const letters = Math.max(2, Math.floor(room / (smallest * monoAdvance)));
+  return { text: `${text.slice(0, letters - 1)}…`, size: smallest };
 }
