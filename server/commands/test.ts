@@ -56,7 +56,7 @@ function runTests(filters: string[]): Tally {
   const isRun = runNode([
     tool('vitest/vitest.mjs'),
     'run',
-    '--reporter=dot',
+    '--reporter=default',
     '--reporter=json',
     `--outputFile.json=${file}`,
     ...filters,
