@@ -1,23 +1,15 @@
 /** A device with a key of one person, that signs entries the way a phone does. */
-import { createHash, generateKeyPairSync, sign, type KeyObject } from 'node:crypto';
+import { createHash } from 'node:crypto';
 import { v7 } from 'uuid';
 import type { Entry } from '../../shared/job/entry';
-import { entryHash, signedBytes } from '../../shared/job/entryBytes';
+import { newKey, signed, type SigningKey } from '../../server/commands/demo/work/signingKey';
+import { entryHash } from '../../shared/job/entryBytes';
 import { logId } from '../../shared/job/logId';
 import type { Agent } from './seedPeople';
 
-export interface SigningDevice {
-  device: string;
-  key: string;
-  privateKey: KeyObject;
-  publicKey: { kty: string; crv: string; x: string; y: string };
-}
-
-export function newDevice(device = v7()): SigningDevice {
-  const pair = generateKeyPairSync('ec', { namedCurve: 'P-256' });
-  const { x = '', y = '' } = pair.publicKey.export({ format: 'jwk' });
-  return { device, key: v7(), privateKey: pair.privateKey, publicKey: { kty: 'EC', crv: 'P-256', x, y } };
-}
+export type SigningDevice = SigningKey;
+export const newDevice = newKey;
+export { signed };
 
 /** Registers the device and the signed-in person's key on it. */
 export async function enrolDevice(agent: Agent, made = newDevice()): Promise<SigningDevice> {
@@ -25,12 +17,6 @@ export async function enrolDevice(agent: Agent, made = newDevice()): Promise<Sig
   const { key: id, device, publicKey } = made;
   await agent.post('/api/devices/keys').send({ id, device, publicKey }).expect(201);
   return made;
-}
-
-export function signed({ privateKey }: SigningDevice, unsigned: Omit<Entry, 'signature'>): Entry {
-  const bytes = signedBytes({ ...unsigned, signature: '' });
-  const signature = sign('sha256', bytes, { key: privateKey, dsaEncoding: 'ieee-p1363' });
-  return { ...unsigned, signature: signature.toString('base64url') };
 }
 
 type Content = Partial<Pick<Entry, 'kind' | 'body' | 'seen' | 'at'>>;
