@@ -3,6 +3,7 @@ import { WordsField } from '../form/WordsField';
 import { useWords } from '../words';
 import { acceptanceGroups, acceptanceKey, type Reasons } from './acceptances';
 import { FindingItem } from './FindingItem';
+import { oneLine } from '../field/oneLine';
 
 interface AcceptFindingsProps {
   findings: readonly (FindingView & { place: string })[];
@@ -28,7 +29,7 @@ export function AcceptFindings({ findings, reasons, onReason, tried }: AcceptFin
               maxLength={500}
               value={reasons[key] ?? ''}
               onChange={(event) => onReason(key, event.target.value)}
-              error={tried && !reasons[key]?.trim() ? t('app.required') : undefined}
+              error={tried && !oneLine(reasons[key] ?? '') ? t('app.required') : undefined}
             />
           </FindingItem>
         );

@@ -1,4 +1,5 @@
 import type { Acceptance, FindingView } from '../../../shared/api/panels';
+import { oneLine } from '../field/oneLine';
 
 type Placed = Pick<FindingView, 'rule' | 'harm'> & { place: string };
 
@@ -27,7 +28,7 @@ export function acceptanceGroups<F extends Placed>(findings: readonly F[]): { fi
 /** The acceptances of the contract, for the findings that have a reason. */
 export const acceptancesOf = (findings: readonly Placed[], reasons: Reasons): Acceptance[] =>
   acceptanceGroups(findings).flatMap(({ first }) => {
-    const reason = reasons[acceptanceKey(first)]?.trim();
+    const reason = oneLine(reasons[acceptanceKey(first)] ?? '');
     if (!reason) return [];
     return [
       first.harm === 'doubt'

@@ -6,6 +6,7 @@ import { Dialog } from '../../components/Dialog';
 import { WordsField } from '../../components/form/WordsField';
 import { ProblemMessage } from '../../components/ProblemMessage';
 import { useWords } from '../../components/words';
+import { oneLine } from '../../components/field/oneLine';
 
 /** Ends a job without a record, with the reason; never while a lock is known on. */
 export function CancelJob({ job }: { job: JobView }) {
@@ -15,9 +16,10 @@ export function CancelJob({ job }: { job: JobView }) {
   const [words, setWords] = useState('');
   const [tried, setTried] = useState(false);
   const locked = job.locks.length > 0;
+  const said = oneLine(words);
   const send = () => {
     setTried(true);
-    if (words.trim()) cancel.mutate(words.trim(), { onSuccess: () => setOpen(false) });
+    if (said) cancel.mutate(said, { onSuccess: () => setOpen(false) });
   };
   return (
     <>
@@ -39,7 +41,7 @@ export function CancelJob({ job }: { job: JobView }) {
           maxLength={500}
           value={words}
           onChange={(event) => setWords(event.target.value)}
-          error={tried && !words.trim() ? t('app.required') : undefined}
+          error={tried && !said ? t('app.required') : undefined}
         />
         <ProblemMessage error={cancel.error} />
       </Dialog>

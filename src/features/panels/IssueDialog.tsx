@@ -14,6 +14,7 @@ import { byHarm } from '../../components/findings/byHarm';
 import { ProblemMessage } from '../../components/ProblemMessage';
 import { useWords } from '../../components/words';
 import { IssueBlocked } from './IssueBlocked';
+import { oneLine } from '../../components/field/oneLine';
 
 interface IssueDialogProps {
   panel: PanelView;
@@ -28,7 +29,7 @@ export function IssueDialog({ panel, findings, onClose }: IssueDialogProps) {
   const [reasons, setReasons] = useState<Reasons>({});
   const [tried, setTried] = useState(false);
   const toAccept = byHarm(findings.findings).filter((each) => mayBeAccepted(each) && each.accepted === null);
-  const complete = toAccept.every((each) => reasons[acceptanceKey(each)]?.trim());
+  const complete = toAccept.every((each) => oneLine(reasons[acceptanceKey(each)] ?? ''));
   const blocked = findings.problems.length > 0;
   const send = () => {
     setTried(true);

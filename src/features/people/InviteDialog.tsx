@@ -13,9 +13,10 @@ import { useErrorWords } from '../../components/form/useErrorWords';
 import { ProblemMessage } from '../../components/ProblemMessage';
 import { useWords } from '../../components/words';
 import { RolesField, type SiteRole } from './RolesField';
+import { oneLine } from '../../components/field/oneLine';
 
 const inviteForm = z.object({
-  name: z.string().trim().min(1, 'app.required').max(120),
+  name: z.string().transform(oneLine).pipe(z.string().min(1, 'app.required').max(120)),
   email: z.email('app.email.wrong').max(200),
   language: z.enum(['en', 'es']),
 });

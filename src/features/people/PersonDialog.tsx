@@ -10,6 +10,7 @@ import { ProblemMessage } from '../../components/ProblemMessage';
 import { SignalBox } from '../../components/SignalBox';
 import { useWords } from '../../components/words';
 import { RolesField } from './RolesField';
+import { oneLine } from '../../components/field/oneLine';
 
 /** Name, roles, and whether the person may use Coldloop at all, with what switching off does. */
 export function PersonDialog({ person, onClose }: { person: PersonView; onClose: () => void }) {
@@ -20,11 +21,11 @@ export function PersonDialog({ person, onClose }: { person: PersonView; onClose:
   const [roles, setRoles] = useState(person.roles);
   const [active, setActive] = useState(person.active);
   const self = session.data?.person.id === person.id;
-  const nameError = name.trim() === '' ? t('app.required') : undefined;
+  const nameError = oneLine(name) === '' ? t('app.required') : undefined;
   const save = () =>
     !nameError &&
     change.mutate(
-      { id: person.id, version: person.version, name: name.trim(), roles, active },
+      { id: person.id, version: person.version, name: oneLine(name), roles, active },
       { onSuccess: onClose },
     );
   return (

@@ -1,7 +1,9 @@
 import { z } from 'zod';
 import type { SiteSettings, SiteView } from '../../../shared/api/sites';
+import { oneLine } from '../../components/field/oneLine';
 
-const words = (max: number) => z.string().trim().min(1, 'app.required').max(max);
+/** What was typed or pasted, without the unseen signs that the contract refuses. */
+const words = (max: number) => z.string().transform(oneLine).pipe(z.string().min(1, 'app.required').max(max));
 
 const instrumentForm = z.object({
   make: words(80),
@@ -16,7 +18,7 @@ export const siteForm = z.object({
   name: words(120),
   emergencyNumber: words(60),
   musterPoint: words(200),
-  foremanPhone: z.string().trim().max(60),
+  foremanPhone: z.string().transform(oneLine).pipe(z.string().max(60)),
   // The limit of common practice may be lowered, never raised: the same bound as in shared/api/sites.
   deadLimitV: z.coerce
     .number<string>('office.site.deadLimit.wrong')

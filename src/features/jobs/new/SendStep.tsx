@@ -10,6 +10,7 @@ import { byHarm } from '../../../components/findings/byHarm';
 import { ProblemMessage } from '../../../components/ProblemMessage';
 import { useWords } from '../../../components/words';
 import { forgetJobDraft, type JobDraft } from './jobDraft';
+import { oneLine } from '../../../components/field/oneLine';
 
 interface SendStepProps {
   draft: JobDraft;
@@ -20,7 +21,7 @@ interface SendStepProps {
 const requestOf = (draft: JobDraft, preview: JobPreview): JobRequest | null => {
   if (draft.panel === null || draft.revision === null) return null;
   const { id, panel, revision, points, electricians, foreman, due } = draft;
-  const words = draft.words.trim();
+  const words = oneLine(draft.words);
   const acceptances = acceptancesOf(
     preview.findings.filter((each) => each.needsAcceptance),
     draft.reasons,
@@ -46,7 +47,7 @@ export function SendStep({ draft, change, preview }: SendStepProps) {
   const send = useSendJob();
   const [tried, setTried] = useState(false);
   const toAccept = byHarm(preview?.findings ?? []).filter((each) => each.needsAcceptance);
-  const complete = toAccept.every((each) => draft.reasons[acceptanceKey(each)]?.trim());
+  const complete = toAccept.every((each) => oneLine(draft.reasons[acceptanceKey(each)] ?? ''));
   const make = async (andSend: boolean) => {
     setTried(true);
     const body = preview && complete ? requestOf(draft, preview) : null;
