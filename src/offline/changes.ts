@@ -24,8 +24,13 @@ export class Changes {
 
   /** Something stored has changed: this tab and all others. Never throws. */
   async announce(): Promise<void> {
-    this.channel.post('changed');
+    this.tellOthers();
     await this.refresh();
+  }
+
+  /** This tab has taken up its own change already; others have to read it. */
+  tellOthers(): void {
+    this.channel.post('changed');
   }
 
   close(): void {

@@ -1,5 +1,6 @@
 /** The device store: everything the field screens ask of this device, over its two databases and its sender. */
 import type { BodyOf, Entry, EntryKind } from '../../shared/job/entry';
+import { AppendBases } from './appendBasis';
 import { appendEntry } from './appendEntry';
 import { Changes } from './changes';
 import { PinCheck } from './checkPin';
@@ -28,10 +29,12 @@ export class LocalDeviceStore implements DeviceStore {
   private readonly pins: PinCheck;
   private readonly readinessChecks: ReadinessChecks;
   private readonly cache: JobCache;
+  private readonly bases: AppendBases;
   private readonly watched = new WatchedJobs();
 
   constructor(private readonly env: DeviceEnvironment) {
     this.databases = openDatabases(env.indexedDB);
+    this.bases = new AppendBases(this.databases);
     this.cache = new JobCache((job) => localJob(this.databases, job));
     this.changes = new Changes(env.openChannel(channelName), () => this.reread());
     this.pins = new PinCheck(env, this.databases.outbox);
@@ -49,6 +52,7 @@ export class LocalDeviceStore implements DeviceStore {
 
   /** Closes what this tab holds open; the store is not used afterwards. */
   async close(): Promise<void> {
+    this.sender.stop();
     this.changes.close();
     await this.databases.outbox.close();
     await this.databases.work.close();
@@ -56,6 +60,7 @@ export class LocalDeviceStore implements DeviceStore {
 
   private reread(): Promise<void> {
     this.cache.forget();
+    this.bases.forget();
     return this.report.reread();
   }
 
@@ -77,10 +82,18 @@ export class LocalDeviceStore implements DeviceStore {
   }
 
   async append<K extends EntryKind>(person: string, job: string, kind: K, body: BodyOf<K>): Promise<Entry> {
-    const entry = await appendEntry(this.env, this.databases, person, job, kind, body);
+    const { env, bases } = this;
+    const { outbox } = this.databases;
+    const entry = await appendEntry({ env, outbox, bases }, person, job, kind, body);
     // It is kept from here on: nothing that follows may make it look as if it were not.
-    await this.changes.announce();
-    void this.sender.trigger({ only: [job] });
+    this.cache.add(entry);
+    this.report.add(entry);
+    this.changes.tellOthers();
+    // After whoever waits for this answer: the screen moves on first.
+    this.env.setTimer(0, () => {
+      this.changes.notify();
+    });
+    this.sender.triggerSoon(job);
     return entry;
   }
 

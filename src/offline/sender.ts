@@ -12,6 +12,8 @@ const visibleMs = 60_000;
 const maxRetryAfterMs = 3_600_000;
 // While in the background the timer alone may wait as long as the back-off may: 2^9 s is above its top.
 const idleFailures = 9;
+/** A new entry waits this long, so that sending does not compete with saving the next one. */
+export const beatMs = 400;
 const lockName = 'coldloop-sending';
 
 export interface SenderHooks {
@@ -42,6 +44,8 @@ export class Sender {
   private running: Promise<void> | null = null;
   private again = false;
   private cancelTimer: (() => void) | null = null;
+  private cancelBeat: (() => void) | null = null;
+  private readonly fresh = new Set<string>();
   private stopWaking: (() => void) | null = null;
 
   constructor(
@@ -53,11 +57,25 @@ export class Sender {
     this.stopWaking ??= this.env.onWake(() => void this.trigger());
     void this.trigger();
     return () => {
-      this.stopWaking?.();
-      this.stopWaking = null;
-      this.cancelTimer?.();
-      this.cancelTimer = null;
+      this.stop();
     };
+  }
+
+  /** Runs nothing more on its own; a round under way ends as it would. */
+  stop(): void {
+    for (const end of [this.stopWaking, this.cancelTimer, this.cancelBeat]) end?.();
+    this.stopWaking = this.cancelTimer = this.cancelBeat = null;
+  }
+
+  /** The job has a new entry: sends it in a moment, together with what else comes until then. */
+  triggerSoon(job: string): void {
+    this.fresh.add(job);
+    this.cancelBeat ??= this.env.setTimer(beatMs, () => {
+      this.cancelBeat = null;
+      const only = [...this.fresh];
+      this.fresh.clear();
+      void this.trigger({ only });
+    });
   }
 
   /** Runs a whole round, or has the running one followed by another; resolves when that is over. */

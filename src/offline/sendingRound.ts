@@ -44,5 +44,6 @@ export async function sendingRound(context: PushContext, { only }: RoundScope): 
   const pulled = worse(pushed, outcome);
   if (jobs === null) return pulled;
   await pruneSealed(context.databases, jobs);
+  await context.changed();
   return pullJobs(context, jobs, pulled);
 }

@@ -1,5 +1,4 @@
-/** Signs an entry's canonical bytes with the person's key of this device. */
-import { signedBytes } from '../../shared/job/entryBytes';
+/** Puts the signature over an entry's canonical bytes to it, made with the person's key of this device. */
 import type { Entry } from '../../shared/job/entry';
 
 export const signatureAlgorithm = { name: 'ECDSA', hash: 'SHA-256' } as const;
@@ -13,13 +12,16 @@ export function base64url(bytes: Uint8Array): string {
     .replaceAll('=', '');
 }
 
-/** WebCrypto signs ECDSA in the P1363 form (r ‖ s, 64 bytes), which is the form of our wire. */
+/**
+ * WebCrypto signs ECDSA in the P1363 form (r ‖ s, 64 bytes), which is the form of our wire.
+ * @param bytes the entry's `signedBytes`
+ */
 export async function signEntry(
   subtle: SubtleCrypto,
   key: CryptoKey,
   unsigned: Omit<Entry, 'signature'>,
+  bytes: Uint8Array<ArrayBuffer>,
 ): Promise<Entry> {
-  const bytes = new Uint8Array(signedBytes({ ...unsigned, signature: '' }));
   const signature = new Uint8Array(await subtle.sign(signatureAlgorithm, key, bytes));
   return { ...unsigned, signature: base64url(signature) };
 }

@@ -148,4 +148,13 @@ describe('append', () => {
     const again = await store.append(mara.id, jobId, 'note', note('hers again'));
     expect([his.seen, hers.seen, again.seen]).toEqual([{}, { [his.log]: 1 }, { [his.log]: 1 }]);
   });
+
+  test('keeps what one person says after all of the other on the same phone was sent', async () => {
+    const { store, server } = await enrolledDevice(undefined, [tomas, mara]);
+    const his = await store.append(tomas.id, jobId, 'note', note('his'));
+    await store.sendNow();
+    expect(server.held).toHaveLength(1);
+    const hers = await store.append(mara.id, jobId, 'note', note('hers'));
+    expect(hers.seen).toEqual({ [his.log]: 1 });
+  });
 });

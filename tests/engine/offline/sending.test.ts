@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { beatMs } from '../../../src/offline/sender';
 import { FakeServer } from '../../support/offline/fakeServer';
 import { enrolledDevice, jobId, mara, tomas } from '../../support/offline/enrolled';
 import { meddledFactory } from '../../support/offline/meddledFactory';
@@ -224,13 +225,18 @@ describe('when it sends', () => {
     expect(device.clock.nextIn()).toBeUndefined();
   });
 
-  test('goes at once on a new entry and on a wake, every 5 s while a job is watched', async () => {
+  test('goes a moment after a new entry and at once on a wake, every 5 s while a job is watched', async () => {
     const { device, server, store } = await enrolledDevice();
     const stop = store.start();
     await settled();
     await store.append(mara.id, jobId, 'note', note('now'));
+    await store.append(mara.id, jobId, 'note', note('and more'));
+    const pushes = () => server.requests.filter(({ method }) => method === 'POST').length;
+    const pushed = pushes();
+    device.clock.pass(beatMs);
     await settled();
-    expect(server.held).toHaveLength(1);
+    expect(server.held).toHaveLength(2);
+    expect(pushes()).toBe(pushed + 1);
     const before = server.requests.length;
     device.wake();
     await settled();
