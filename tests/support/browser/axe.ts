@@ -8,8 +8,8 @@ const source = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe
 
 export async function axeFindings(page: Page): Promise<string[]> {
   // The page's policy refuses script tags: the debugger's own evaluation is not one.
-  await page.evaluate(source);
-  const { violations } = await page.evaluate<AxeResults>('axe.run()');
+  if (!(await page.evaluate<boolean>('"axe" in window'))) await page.evaluate(source);
+  const { violations } = await page.evaluate<AxeResults>('axe.run({ resultTypes: ["violations"] })');
   return violations.flatMap(({ id, help, nodes }) =>
     nodes.map(
       ({ target, failureSummary }) => `${id}: ${help} at ${target.join(' ')} (${failureSummary ?? ''})`,
@@ -19,4 +19,10 @@ export async function axeFindings(page: Page): Promise<string[]> {
 
 /** Text wider than the window hides behind its edge on a phone. */
 export const sticksOut = (page: Page): Promise<boolean> =>
-  page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth + 1);
+  page.evaluate(() => {
+    const room = document.documentElement.clientWidth + 1;
+    const open = document.querySelector('dialog[open]');
+    return (
+      document.documentElement.scrollWidth > room || (open ? open.scrollWidth > open.clientWidth + 1 : false)
+    );
+  });

@@ -13,8 +13,10 @@ import { templateName } from '../postgres';
 
 export interface LiveServer {
   url: string;
-  services: Services;
+  readonly services: Services;
   mailFolder: string;
+  /** Stops answering, as a server that is being restarted does; what it returns starts it again on the same database. */
+  stop: () => Promise<() => Promise<void>>;
   close: () => Promise<void>;
 }
 
@@ -26,7 +28,7 @@ export async function liveServer(): Promise<LiveServer> {
   const mail = await startMailFake(mailFolder);
   const port = await freePort();
   const url = `http://localhost:${port}`;
-  const serving = await serve({
+  const config = {
     production: false,
     databaseUrl: adminUrl.replace(/\/postgres$/, `/${name}`),
     port,
@@ -37,12 +39,21 @@ export async function liveServer(): Promise<LiveServer> {
     mailFrom: 'Coldloop <coldloop@localhost>',
     devMailFolder: mailFolder,
     trustProxy: 0,
-    logLevel: 'silent',
-  });
+    logLevel: 'silent' as const,
+  };
+  let serving = await serve(config);
   return {
     url,
-    services: serving.services,
+    get services() {
+      return serving.services;
+    },
     mailFolder,
+    stop: async () => {
+      await serving.close();
+      return async () => {
+        serving = await serve(config);
+      };
+    },
     close: async () => {
       await serving.close();
       await mail.close();

@@ -31,19 +31,36 @@ interface NewJob {
   foreman: string;
 }
 
-export async function sendJob(page: Page, { panel, points, electrician, foreman }: NewJob): Promise<void> {
-  const next = () => page.getByRole('button', { name: en['app.next'] }).click();
+const next = (page: Page) => page.getByRole('button', { name: en['app.next'] }).click();
+
+/** The first half: the panel as it is issued now, and its points. */
+export async function choosePoints(
+  page: Page,
+  { panel, points }: Pick<NewJob, 'panel' | 'points'>,
+): Promise<void> {
   await page.goto(paths.newJob);
   await page.getByRole('radio', { name: new RegExp(panel.tag) }).check();
-  await next();
+  await next(page);
   for (const address of points) await page.getByRole('checkbox', { name: new RegExp(address) }).check();
-  await next();
+  await next(page);
+}
+
+/** The second half: who does it, until when, and off it goes. */
+export async function choosePeopleAndSend(
+  page: Page,
+  { electrician, foreman }: Pick<NewJob, 'electrician' | 'foreman'>,
+): Promise<void> {
   await page.getByRole('checkbox', { name: electrician }).check();
   await page.getByLabel(en['office.new.foreman']).selectOption({ label: foreman });
   await page.getByLabel(en['office.due']).fill('2027-01-15');
-  await next();
+  await next(page);
   for (const box of await page.getByLabel(en['office.accept.reason']).all())
     await box.fill('Agreed with the panel engineer');
   await page.getByRole('button', { name: en['office.send'], exact: true }).click();
   await page.waitForURL((url) => url.pathname === paths.jobs);
+}
+
+export async function sendJob(page: Page, job: NewJob): Promise<void> {
+  await choosePoints(page, job);
+  await choosePeopleAndSend(page, job);
 }
