@@ -37,11 +37,7 @@ export function deadReading(
   limitV: number,
   dead: NonNullable<ReadingAsk['dead']>,
 ): ReadingAsk {
-  return {
-    kind: 'reading',
-    unit: `V ${function_}`,
-    low: function_ === 'DC' ? -limitV : 0,
-    high: limitV,
-    dead,
-  };
+  return function_ === 'DC'
+    ? { kind: 'reading', unit: 'V DC', low: -limitV, high: limitV, dead }
+    : { kind: 'reading', unit: 'V AC', low: 0, high: limitV, dead };
 }

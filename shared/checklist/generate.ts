@@ -2,7 +2,14 @@
 import { factsOf, type ChecklistInput } from './facts';
 import { intoParts } from './intoParts';
 import { stageBlocks } from './stageBlocks';
-import { stages, type Checklist } from './types';
+import { stages, type Checklist, type Step } from './types';
+
+function refuseSharedIds(steps: readonly Step[]): void {
+  const ids = new Set(steps.map(({ id }) => id));
+  if (ids.size === steps.length) return;
+  const shared = steps.find(({ id }) => !ids.delete(id));
+  throw new Error(`two steps share the id ${shared?.id}`);
+}
 
 /**
  * Makes the checklist that the pack of a job carries.
@@ -11,11 +18,7 @@ import { stages, type Checklist } from './types';
 export function generateChecklist(input: ChecklistInput): Checklist {
   const facts = factsOf(input);
   const steps = stages.map((stage) => intoParts(stageBlocks[stage](facts))).flat();
-  const ids = new Set<string>();
-  for (const { id } of steps) {
-    if (ids.has(id)) throw new Error(`two steps share the id ${id}`);
-    ids.add(id);
-  }
+  refuseSharedIds(steps);
   return {
     format: 'coldloop-checklist/1',
     ruleSet: input.ruleSet,
