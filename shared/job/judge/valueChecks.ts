@@ -2,9 +2,9 @@
 import type { AnswerValue } from '../entry';
 import { refuse } from '../gate/gateFacts';
 import { inLimits } from '../known/inLimits';
-import { isOf, isKnownTo, type Placed } from '../order/placed';
+import { before, isOf, isKnownTo, type Placed } from '../order/placed';
 import type { AnswerRecord, Refusal } from '../types';
-import { isOn } from '../view/locks';
+import { isOn, ownLock } from '../view/locks';
 import { isInRound } from '../view/rounds';
 import type { View } from '../view/view';
 
@@ -42,7 +42,14 @@ const notThatLock: ValueCheck = ({ view, placed }) => {
 const sameReading = (a: AnswerRecord['value'], b: AnswerValue): boolean =>
   a.kind === 'reading' && b.kind === 'reading' && a.value === b.value;
 
-/** A watched reading repeats the one it names, which a colleague took in this round. */
+/** Who watched stood under their own locks by then: a reading taken before those says nothing for them. */
+const isUnderOwnLocks = (view: View, person: string, reading: Placed): boolean =>
+  view.setting.lookup.isolators.every((isolator) => {
+    const own = ownLock(view, isolator, person);
+    return own !== undefined && before(own.on, reading);
+  });
+
+/** A watched reading repeats the one it names, which a colleague took in this round under the watcher's own locks. */
 const notWatched: ValueCheck = ({ view, placed, step }) => {
   if (!isOf(placed, 'answer') || placed.known.body.watched === undefined) return undefined;
   const { watched, value } = placed.known.body;
@@ -52,6 +59,7 @@ const notWatched: ValueCheck = ({ view, placed, step }) => {
       answer.person !== placed.person &&
       isKnownTo(answer.placed, placed) &&
       isInRound(view, answer.placed) &&
+      isUnderOwnLocks(view, placed.person, answer.placed) &&
       sameReading(answer.value, value),
   );
   return isThere ? undefined : refuse('not-watched');

@@ -1,6 +1,13 @@
 /** A checklist looked up once: steps by number, by stage, by point, by isolator. */
 import { stages, type Checklist, type Step } from '../../checklist/types';
 
+/** One part of Prove dead: the tester is proved, pairs are read, the tester is proved again. */
+export interface ProvedPart {
+  before: readonly number[];
+  readings: readonly number[];
+  after: readonly number[];
+}
+
 export interface Lookup {
   steps: readonly Step[];
   numberOf: ReadonlyMap<string, number>;
@@ -18,6 +25,9 @@ export interface Lookup {
   isolators: readonly string[];
   /** What each person answers alone to prove dead: tester, readings, stored charge. */
   ownTests: readonly number[];
+  provedParts: readonly ProvedPart[];
+  /** The testers that each person names: another one makes every reading before it worthless. */
+  instruments: readonly number[];
   /** The terminals of a point, each read dead by who works on it. */
   terminals: ReadonlyMap<string, readonly number[]>;
 }
@@ -49,8 +59,31 @@ function byIsolator(steps: readonly Step[], kind: 'lock-on' | 'lock-off' | 'clos
   return found;
 }
 
+/** A tester proof before the first reading of its part comes before all of them; any other comes after them. */
+function provedParts(steps: readonly Step[], ownTests: readonly number[]): ProvedPart[] {
+  const byPart = new Map<number, number[]>();
+  for (const number of ownTests) {
+    const part = steps[number]?.part ?? 0;
+    byPart.set(part, [...(byPart.get(part) ?? []), number]);
+  }
+  return [...byPart.values()].map((numbers) => {
+    const proofs = numbers.filter((number) => steps[number]?.family === 'tester-proved');
+    const readings = numbers.filter((number) => {
+      const ask = steps[number]?.ask;
+      return ask?.kind === 'reading' && ask.dead !== undefined;
+    });
+    const first = readings[0] ?? Infinity;
+    return {
+      before: proofs.filter((number) => number < first),
+      readings,
+      after: proofs.filter((number) => number > first),
+    };
+  });
+}
+
 function lookUp({ steps, isolators }: Checklist): Lookup {
   const inStage = grouped(steps, ({ stage }) => stage);
+  const ownTests = (inStage.get('prove-dead') ?? []).filter((index) => steps[index]?.by === 'each');
   return {
     steps,
     numberOf: new Map(steps.map(({ id }, index) => [id, index])),
@@ -64,7 +97,11 @@ function lookUp({ steps, isolators }: Checklist): Lookup {
     lockOff: byIsolator(steps, 'lock-off'),
     close: byIsolator(steps, 'close'),
     isolators,
-    ownTests: (inStage.get('prove-dead') ?? []).filter((index) => steps[index]?.by === 'each'),
+    ownTests,
+    provedParts: provedParts(steps, ownTests),
+    instruments: steps.flatMap(({ ask, by }, index) =>
+      ask.kind === 'instrument' && by === 'each' ? [index] : [],
+    ),
     terminals: grouped(steps, ({ personal, where }) => (personal ? where?.point : undefined)),
   };
 }

@@ -24,7 +24,7 @@ export function applyAnswer(view: View, answer: Answered): void {
   if (!asked) return;
   noteDanger(view, answer);
   // Plain answers are most of a job; only those on which a proof may hang make it stale.
-  if (isProving(asked) && !asked.personal) view.proofVersion += 1;
+  if ((isProving(asked) && !asked.personal) || asked.ask.kind === 'instrument') view.proofVersion += 1;
   if (verdict === 'refused') return;
   view.started = true;
   if (asked.family === 'tester-proved' && verdict === 'out') addTo(view.failures, step, answer);

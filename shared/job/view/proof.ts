@@ -1,11 +1,12 @@
 /** One person's proof in a view: their locks on every isolator and, after them, their own dead readings. */
 import type { Placed } from '../order/placed';
+import { unprovedIn } from './provedParts';
 import { isAfterAll } from './frontier';
 import { ownLock } from './locks';
 import { isolationOver, reopenersOf } from './rounds';
 import type { Answered, Lock, PanelProof, View } from './view';
 
-function ownNewest(view: View, step: number, person: string): readonly Answered[] {
+export function ownNewest(view: View, step: number, person: string): readonly Answered[] {
   const answers = view.own[step] ?? view.answers[step] ?? [];
   return answers.filter((each) => each.person === person);
 }
@@ -24,7 +25,7 @@ function testerFailures(view: View, step: number, person: string): Placed[] {
 
 interface Since {
   person: string;
-  /** What a reading must have seen: own locks, every round, supervised removals. */
+  /** What a reading must have seen: own locks, the tester it is read with, every round, supervised removals. */
   after: readonly Placed[];
   locks: readonly Lock[];
   /** Digest of the checklist in force; readings answered under another prove nothing. */
@@ -34,7 +35,11 @@ interface Since {
 export function sinceOf(view: View, person: string, pack: string | undefined): Since {
   const locks = view.setting.lookup.isolators.flatMap((tag) => ownLock(view, tag, person) ?? []);
   const rounds = view.rounds.map(({ placed }) => placed);
-  return { person, after: [...locks.map(({ on }) => on), ...rounds, ...view.removals], locks, pack };
+  const testers = view.setting.lookup.instruments
+    .flatMap((step) => ownNewest(view, step, person))
+    .map(({ placed }) => placed);
+  const after = [...locks.map(({ on }) => on), ...testers, ...rounds, ...view.removals];
+  return { person, after, locks, pack };
 }
 
 /** Did this person answer this step in limits since then, and nothing worse after it? */
@@ -63,8 +68,9 @@ function proofIn(view: View, person: string, pack: string | undefined): PanelPro
   const since = sinceOf(view, person, pack);
   const locked = since.locks.map(({ isolator, lock, on }) => ({ isolator, lock, at: on.entry.at }));
   const missingLocks = isolators.filter((tag) => !locked.some(({ isolator }) => isolator === tag));
+  const unproved = unprovedIn(view, person);
   const missingTests = ownTests
-    .filter((step) => !isMeasured(view, step, since))
+    .filter((step) => unproved.has(step) || !isMeasured(view, step, since))
     .flatMap((step) => steps[step]?.id ?? []);
   // Without an isolator or a reading there is nothing that could have proved anything.
   const isAsked = isolators.length > 0 && ownTests.length > 0;

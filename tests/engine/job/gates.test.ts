@@ -45,6 +45,13 @@ const off = (job: Job, person: JobPerson, isolator: string) =>
 const read = (job: Job, id: string, value: number) =>
   job.write(mara, 'answer', answerBody(stepOf(id), { kind: 'reading', value }));
 
+/** Proves the tester once more after the part of the first dead test. */
+const proveAfter = (job: Job) =>
+  checklist.steps
+    .filter(({ id, part }) => id.includes('.tester.after') && part === stepOf(deadTest).part)
+    .filter(({ stage }) => stage === 'prove-dead')
+    .map((step) => answerWell(job, mara, step));
+
 /** Everything that a person answers alone before a step. */
 function prepare(job: Job, person: JobPerson, before: string): void {
   const end = checklist.steps.findIndex(({ id }) => id === before);
@@ -83,7 +90,16 @@ const wiring: [name: string, act: (job: Job) => unknown, codes: string[]][] = [
     ['contradiction'],
   ],
   ['a dead test read live', (job) => read(job, deadTest, 118), ['danger', 'order', 'own-tests']],
-  ['read live, then dead again', (job) => [read(job, deadTest, 118), read(job, deadTest, 0)], []],
+  [
+    'read live, then dead again, the tester not proved after it',
+    (job) => [read(job, deadTest, 118), read(job, deadTest, 0)],
+    ['own-tests'],
+  ],
+  [
+    'read live, then dead again, the tester proved after it',
+    (job) => [read(job, deadTest, 118), read(job, deadTest, 0), ...proveAfter(job)],
+    [],
+  ],
   [
     'a negative reading is as live',
     (job) => read(job, 'dead.S24.+-0 V.dc', -24),
@@ -213,17 +229,20 @@ describe('landing a wire', () => {
 
   test('a watched reading counts only as the one that it names', () => {
     const job = base.copy();
-    const mine = job.entries.find(({ kind, body }) => kind === 'answer' && body.step === deadTest);
+    const early = job.entries.find(({ kind, body }) => kind === 'answer' && body.step === deadTest);
     prepare(job, ilya, deadTest);
-    const watched = (value: number) =>
+    const mine = read(job, deadTest, 0.1);
+    const watched = (value: number, entry = mine) =>
       job.write(ilya, 'answer', {
         ...answerBody(stepOf(deadTest), { kind: 'reading', value }),
-        watched: mine?.id ?? '',
+        watched: entry.id,
       });
     watched(0.7);
+    // Taken before the watcher had locked on.
+    watched(0.1, early);
     watched(0.1);
     const history = job.state().steps[deadTest]?.history.filter(({ person }) => person === ilya.id);
-    expect(history?.map(({ verdict }) => verdict)).toEqual(['refused', 'ok']);
+    expect(history?.map(({ verdict }) => verdict)).toEqual(['refused', 'refused', 'ok']);
   });
 });
 
