@@ -1,100 +1,189 @@
-/** The rules of proof written a second time, slowly and plainly, to judge the engine by. */
-import type { Checklist } from '../../../shared/checklist/types';
-import { bodySchemas, type BodyOf, type Entry, type EntryKind } from '../../../shared/job/entry';
+/** The rules of isolation.md and checklist.md written a second time, to judge the engine by. */
+import type { Checklist, Stage, Step } from '../../../shared/checklist/types';
+import type { Entry } from '../../../shared/job/entry';
+import { NaiveFacts, type Seen } from './naiveFacts';
+import { bodyOf, type NaivePast } from './naivePast';
 
-const bodyOf = <K extends EntryKind>(entry: Entry, kind: K): BodyOf<K> | undefined => {
-  if (entry.kind !== kind) return undefined;
-  const parsed = bodySchemas[kind].safeParse(entry.body);
-  return parsed.success ? parsed.data : undefined;
+const among = (...stages: Stage[]) => {
+  const set = new Set(stages);
+  return ({ stage }: Step): boolean => set.has(stage);
 };
+const underLocks = among('prove-dead', 'wire', 'check-cold', 'close-up');
+const isolated = among('isolate', 'prove-dead', 'wire', 'check-cold', 'close-up');
+const first = among('get-ready', 'isolate', 'prove-dead');
+const later = among('wire', 'check-cold', 'close-up', 'locks-off', 'close', 'prove-points');
+const alone = among('wire', 'check-cold');
+const isTest = ({ stage, by }: Step): boolean => stage === 'prove-dead' && by === 'each';
 
-const pasts = new WeakMap<readonly Entry[], Map<Entry, Set<Entry>>>();
+/** A person at a step, with what they know. */
+export class NaiveOracle {
+  private readonly facts: NaiveFacts;
+  private lacks: string[] | undefined;
 
-/** Everything an entry had seen, found by walking back step by step. No forks here. */
-export function naivePast(all: readonly Entry[], from: Entry): Set<Entry> {
-  const known = pasts.get(all) ?? new Map<Entry, Set<Entry>>();
-  pasts.set(all, known);
-  const past = known.get(from) ?? walkBack(all, from);
-  known.set(from, past);
-  return past;
-}
-
-function walkBack(all: readonly Entry[], from: Entry): Set<Entry> {
-  const past = new Set<Entry>();
-  const open = [from];
-  for (let next = open.pop(); next; next = open.pop())
-    for (const each of all) {
-      const limit = each.log === next.log ? next.seq - 1 : (next.seen[each.log] ?? 0);
-      if (each.seq > limit || past.has(each)) continue;
-      past.add(each);
-      open.push(each);
-    }
-  past.delete(from);
-  return past;
-}
-
-interface Oracle {
-  checklist: Checklist;
-  entries: readonly Entry[];
-  personOf: (entry: Entry) => string | undefined;
-}
-
-/** This person's locks on an isolator that were on, by what `at` had seen. */
-function locksOn({ entries, personOf }: Oracle, past: ReadonlySet<Entry>, person: string, isolator: string) {
-  return [...past].filter((entry) => {
-    const lock = bodyOf(entry, 'lock-on');
-    if (lock?.isolator !== isolator || personOf(entry) !== person) return false;
-    return ![...past].some((other) => {
-      const off = bodyOf(other, 'lock-off') ?? bodyOf(other, 'lock-removed-by-supervisor');
-      return (
-        off?.isolator === isolator &&
-        off.lock === lock.lock &&
-        (other.kind === 'lock-off' ? personOf(other) === person : true) &&
-        naivePast(entries, other).has(entry)
-      );
-    });
-  });
-}
-
-const isGoodReading = (checklist: Checklist, entry: Entry): string | undefined => {
-  const body = bodyOf(entry, 'answer');
-  const ask = checklist.steps.find(({ id }) => id === body?.step)?.ask;
-  if (ask?.kind !== 'reading' || !ask.dead || body?.value.kind !== 'reading') return undefined;
-  return Math.abs(body.value.value) <= (ask.high ?? 0) ? body.step : undefined;
-};
-
-/** Why this answer must not count; empty when nothing stands against it. */
-export function reasonsAgainst(oracle: Oracle, answer: Entry): string[] {
-  const { checklist, entries, personOf } = oracle;
-  const person = personOf(answer) ?? '';
-  const past = naivePast(entries, answer);
-  const reasons: string[] = [];
-  const mine = checklist.isolators.flatMap((isolator) => {
-    const on = locksOn(oracle, past, person, isolator);
-    if (on.length === 0) reasons.push(`no own lock on ${isolator}`);
-    return on;
-  });
-  const tests = checklist.steps.filter(
-    ({ stage, by, ask }) => stage === 'prove-dead' && by === 'each' && ask.kind === 'reading' && ask.dead,
-  );
-  const rounds = [...past].filter(({ kind }) => kind === 'round-started');
-  for (const { id } of tests) {
-    const good = [...past].filter((entry) => {
-      if (personOf(entry) !== person || isGoodReading(checklist, entry) !== id) return false;
-      const seen = naivePast(entries, entry);
-      const afterLocks = checklist.isolators.every((isolator) =>
-        mine.some((lock) => bodyOf(lock, 'lock-on')?.isolator === isolator && seen.has(lock)),
-      );
-      return afterLocks && rounds.every((round) => seen.has(round));
-    });
-    if (good.length === 0) reasons.push(`no own reading of ${id}`);
+  constructor(
+    private readonly checklist: Checklist,
+    private readonly past: NaivePast,
+    seen: Seen,
+    private readonly person: string,
+    /** Digest of the checklist in force; undefined where nobody has said. */
+    private readonly pack?: string,
+  ) {
+    this.facts = new NaiveFacts(checklist, past, seen);
   }
-  const closed = [...past].some(
-    (entry) =>
-      bodyOf(entry, 'closed')?.counted === 0 &&
-      !rounds.some((round) => naivePast(entries, round).has(entry)) &&
-      ![...past].some((other) => other.kind === 'returned' && naivePast(entries, other).has(entry)),
-  );
-  if (closed) reasons.push('something was closed in this round');
-  return reasons;
+
+  /** After one's own locks on every isolator, every round and removal, and nothing worse since. */
+  private isRead(step: Step): boolean {
+    const { facts, past, person, checklist } = this;
+    const own = facts.answersTo(step).filter((each) => past.by(each) === person);
+    const after = [...facts.rounds(), ...facts.removals(), ...facts.sentBack(step)];
+    return own.some((good) => {
+      const worse = [
+        ...own.filter((each) => past.counts(each) && !past.isGood(each)),
+        ...this.failures(step),
+      ];
+      return (
+        past.isGood(good) &&
+        past.isSure(good) &&
+        (this.pack === undefined || good.pack === this.pack) &&
+        past.sawAll(good, after) &&
+        worse.every((bad) => past.saw(good, bad)) &&
+        checklist.isolators.every((tag) => facts.ownLocks(person, tag).some((on) => past.saw(good, on)))
+      );
+    });
+  }
+
+  /** The tester did not show the known voltage. */
+  private failures({ stage, part }: Step): Entry[] {
+    if (stage !== 'prove-dead') return [];
+    return this.checklist.steps
+      .filter((step) => isTest(step) && step.family === 'tester-proved' && step.part === part)
+      .flatMap((step) => this.facts.answersTo(step))
+      .filter((each) => this.past.by(each) === this.person)
+      .filter((each) => this.past.counts(each) && !this.past.isGood(each));
+  }
+
+  /** Why this person has no proof. */
+  proof(): string[] {
+    this.lacks ??= [
+      ...this.locks(),
+      ...this.checklist.steps
+        .filter((step) => isTest(step) && !this.isRead(step))
+        .map(({ id }) => `no own reading of ${id}`),
+      ...(this.facts.isOver() ? ['isolation is over'] : []),
+    ];
+    return this.lacks;
+  }
+
+  private locks(): string[] {
+    return this.checklist.isolators
+      .filter((tag) => this.facts.ownLocks(this.person, tag).length === 0)
+      .map((tag) => `no own lock on ${tag}`);
+  }
+
+  private terminals(step: Step): string[] {
+    if (!step.needsIsolation || step.personal) return [];
+    return this.checklist.steps
+      .filter((each) => each.personal && each.where?.point === step.where?.point && !this.isRead(each))
+      .map(({ id }) => `has not read ${id}`);
+  }
+
+  /** Answered in this round, and of answers that did not know each other none is bad. */
+  private isDone(step: Step): boolean {
+    const { facts, past } = this;
+    if (step.stage === 'get-ready' && facts.isDecided(step)) return true;
+    const after = [...(step.everyRound ? facts.rounds() : []), ...facts.sentBack(step)];
+    const all = facts.answersTo(step).filter((each) => past.counts(each) && past.sawAll(each, after));
+    const mine = step.by === 'each' ? all.filter((each) => past.by(each) === this.person) : all;
+    const newest = mine.filter((each) => !mine.some((other) => past.saw(other, each)));
+    return newest.length > 0 && newest.every((each) => past.isGood(each));
+  }
+
+  private order(step: Step): string[] {
+    if (!later(step)) return [];
+    return this.checklist.steps
+      .filter((each) => first(each) && (each.by === 'one' || alone(step)))
+      .filter(({ ask }) => ask.kind !== 'lock-on')
+      .filter((each) => !this.isDone(each))
+      .map(({ id }) => `${id} is not done`);
+  }
+
+  private closing({ ask }: Step): string[] {
+    if (ask.kind !== 'close') return [];
+    const hung = this.facts.locksOn().filter((on) => bodyOf(on, 'lock-on')?.isolator === ask.isolator);
+    const people = this.past.told.people.filter(({ part }) => part === 'electrician');
+    return [
+      ...hung.map(() => `a lock is on ${ask.isolator}`),
+      ...people.filter(({ id }) => !this.facts.isClear(id)).map(({ name }) => `${name} is not clear`),
+    ];
+  }
+
+  private dangers(step: Step): string[] {
+    const critical = step.needsIsolation || step.ask.kind === 'close';
+    const isReading = step.ask.kind === 'reading' && step.ask.dead !== undefined;
+    return [
+      ...(critical && this.facts.disagree() ? ['entries disagree'] : []),
+      ...(critical && this.facts.unreadable() ? ['an entry cannot be read'] : []),
+      ...(step.needsIsolation && !isReading && this.facts.isLive() ? ['a reading was live'] : []),
+      ...(isolated(step) && this.facts.isStopped() ? ['a hold stops the job'] : []),
+      ...(isolated(step) && this.facts.isOver() ? ['isolation is over'] : []),
+    ];
+  }
+
+  private leftovers({ id, stage, ask }: Step): string[] {
+    const asks = stage === 'locks-off' || stage === 'close' || id === 'closeup.temporary';
+    const isMine =
+      ask.kind !== 'lock-off' ||
+      this.facts
+        .locksOn()
+        .some((on) => this.past.by(on) === this.person && bodyOf(on, 'lock-on')?.isolator === ask.isolator);
+    return [
+      ...(asks && this.facts.hasTemporaries() ? ['a jumper is left'] : []),
+      ...(isMine ? [] : ['no lock of theirs']),
+    ];
+  }
+
+  private given(): string[] {
+    return [
+      ...(this.past.has(this.person, 'electrician') ? [] : ['does not work here']),
+      ...(this.facts.seen.some(
+        (each) => each.kind === 'accepted' && this.past.has(this.past.by(each), 'electrician'),
+      )
+        ? []
+        : ['nobody has accepted the job']),
+    ];
+  }
+
+  /** Everything that stands against this person answering this step; empty when nothing does. */
+  against(step: Step): string[] {
+    return [
+      ...this.given(),
+      ...this.dangers(step),
+      ...(underLocks(step) ? this.locks() : []),
+      ...(step.needsIsolation ? this.proof() : []),
+      ...this.terminals(step),
+      ...this.order(step),
+      ...this.closing(step),
+      ...this.leftovers(step),
+    ];
+  }
+
+  /** What the answer itself has against it: a padlock that hangs elsewhere, a reading nobody took. */
+  againstValue(entry: Entry): string[] {
+    const lock = bodyOf(entry, 'lock-on')?.lock;
+    const isTwice = this.facts.locksOn().some((on) => bodyOf(on, 'lock-on')?.lock === lock);
+    const body = bodyOf(entry, 'answer');
+    const watched = this.facts.seen.find(({ id }) => id === body?.watched);
+    const taken = watched && bodyOf(watched, 'answer');
+    const isTaken =
+      watched !== undefined &&
+      taken?.step === body?.step &&
+      this.past.by(watched) !== this.person &&
+      this.past.counts(watched) &&
+      this.past.sawAll(watched, this.facts.rounds()) &&
+      JSON.stringify(taken?.value) === JSON.stringify(body?.value);
+    return [
+      ...(lock !== undefined && isTwice ? [`lock ${lock} hangs elsewhere`] : []),
+      ...(body?.watched !== undefined && !isTaken ? ['nobody took that reading'] : []),
+    ];
+  }
 }
