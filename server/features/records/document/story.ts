@@ -116,10 +116,13 @@ export function logs({ folded, nameOf }: Reader): RecordDocument['logs'] {
 /** Instants as the devices' clocks said them. */
 export function times({ folded }: Reader, sentAt: Date | null): RecordDocument['times'] {
   const { signatures: signed, countersign } = folded.state;
-  const begun = folded.entries.filter(({ entry }) => entry.kind !== 'accepted' && entry.kind !== 'note');
+  // The entries stand log by log: the first of the list may be the foreman's last.
+  const begun = folded.entries
+    .flatMap(({ entry }) => (entry.kind === 'accepted' || entry.kind === 'note' ? [] : [entry.at]))
+    .sort((a, b) => Date.parse(a) - Date.parse(b));
   return {
     sentAt: sentAt?.toISOString() ?? null,
-    startedAt: begun[0]?.entry.at ?? null,
+    startedAt: begun[0] ?? null,
     signedAt: signed.filter(({ stands }) => stands).at(-1)?.at ?? null,
     countersignedAt: countersign?.at ?? null,
   };
