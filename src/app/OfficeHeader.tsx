@@ -20,7 +20,7 @@ function SiteChoice() {
       aria-label={t('app.site')}
       value={site?.id}
       onChange={(event) => choose(event.target.value)}
-      className="min-h-11 max-w-52 border border-edge bg-sheet px-2"
+      className="min-h-11 max-w-full border border-edge bg-sheet px-2 text-ink md:max-w-80"
     >
       {sites.map((each) => (
         <option key={each.id} value={each.id}>
