@@ -7,9 +7,16 @@ import type { Warning } from './types';
 export const isDangerous = (V: number, kind: 'dc' | 'ac1' | 'ac3' | undefined): boolean =>
   V > (kind === 'dc' ? 60 : 25);
 
+// The file format allows a tolerance of +100 % at most: what an unstated one has to be taken for.
+const unstatedMaxPct = 100;
+
+/** The label alone says nothing: a circuit called SELV that carries more volts than touch bears is as live as any. */
+const isHarmless = ({ extraLow, kind, V, tolerance }: Supply): boolean =>
+  extraLow !== 'none' && !isDangerous(V * (1 + (tolerance?.maxPct ?? unstatedMaxPct) / 100), kind);
+
 /** Readings on a supply above extra-low voltage are taken next to what kills; an unknown supply counts as one. */
 export const liveMeasuring = (supply: Supply | undefined): Warning[] =>
-  supply?.extraLow === 'SELV' || supply?.extraLow === 'PELV'
+  supply && isHarmless(supply)
     ? []
     : [{ signal: 'danger', says: say('checklist.warning.live-measuring', { V: supply?.V ?? '?' }) }];
 

@@ -40,7 +40,7 @@ describe('a dead reading', () => {
     ['below 80 %', 'V DC', 19.1, undefined],
     ['probes the other way round', 'V DC', -24, 'S24'],
     ['the AC supply', 'V AC', 118, 'C2'],
-    ['an AC reading says nothing of a DC supply', 'V AC', 24, undefined],
+    ['a DC supply read as AC is as live', 'V AC', 24, 'S24'],
   ] as const)('tells a supply that is still on: %s', (_name, unit, value, supply) => {
     expect(supplyStillOn(samplePanel, dead(unit), value)?.tag).toBe(supply);
   });

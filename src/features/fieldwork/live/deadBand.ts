@@ -18,13 +18,16 @@ export function deadBand(ask: ReadingAsk, value: number): DeadBand {
   return V > liveAboveV[ask.unit === 'V DC' ? 'V DC' : 'V AC'] ? 'live' : 'not-dead';
 }
 
-/** The supply the reading looks like, nearest first; undefined when it reaches 80 % of none. */
+const isRead = ({ kind }: Supply, { unit }: ReadingAsk): boolean => (kind === 'dc') === (unit === 'V DC');
+
+/**
+ * The supply the reading looks like, nearest first; undefined when it reaches 80 % of none.
+ * AC or DC makes no difference: a meter on the wrong function shows a live supply all the same.
+ */
 export function supplyStillOn(panel: Panel, ask: ReadingAsk, value: number): Supply | undefined {
   const V = Math.abs(value);
   const near = panel.supplies
-    .filter(
-      (supply) => (supply.kind === 'dc') === (ask.unit === 'V DC') && V >= stillOnShare * supply.V - rounding,
-    )
-    .sort((a, b) => Math.abs(a.V - V) - Math.abs(b.V - V));
+    .filter((supply) => V >= stillOnShare * supply.V - rounding)
+    .sort((a, b) => Number(isRead(b, ask)) - Number(isRead(a, ask)) || Math.abs(a.V - V) - Math.abs(b.V - V));
   return near.find((supply) => supply.tag === ask.dead?.supply) ?? near[0];
 }

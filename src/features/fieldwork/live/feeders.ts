@@ -1,4 +1,5 @@
 /** What can make a terminal live although this person's locks are on: told from the energy graph, likeliest first. */
+import { countsAsIsolation, electricalKind } from '../../../../shared/isolation/countsAsIsolation';
 import type { Live } from '../../../../shared/isolation/types';
 import { reach } from '../../../../shared/isolation/reach';
 import type { ReadingAsk } from '../../../../shared/checklist/types';
@@ -19,7 +20,7 @@ const isolatorsOn = (panel: Panel, path: string[]): Isolator[] =>
 
 function pathFeeder(panel: Panel, live: Live, locked: ReadonlySet<string>): Feeder {
   const open = isolatorsOn(panel, live.path).find(
-    ({ tag, suitableForIsolation }) => suitableForIsolation && !locked.has(tag),
+    (isolator) => countsAsIsolation(isolator) && electricalKind(isolator) && !locked.has(isolator.tag),
   );
   return { why: 'path', path: live.path, maybe: live.maybe, ...(open ? { open } : {}) };
 }
