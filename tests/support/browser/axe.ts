@@ -9,7 +9,10 @@ const source = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe
 export async function axeFindings(page: Page): Promise<string[]> {
   // The page's policy refuses script tags: the debugger's own evaluation is not one.
   if (!(await page.evaluate<boolean>('"axe" in window'))) await page.evaluate(source);
-  const { violations } = await page.evaluate<AxeResults>('axe.run({ resultTypes: ["violations"] })');
+  // Behind an open sheet nothing can be reached: the sheet alone is the screen.
+  const { violations } = await page.evaluate<AxeResults>(
+    'axe.run(document.querySelector("dialog[open]") ?? document, { resultTypes: ["violations"] })',
+  );
   return violations.flatMap(({ id, help, nodes }) =>
     nodes.map(
       ({ target, failureSummary }) => `${id}: ${help} at ${target.join(' ')} (${failureSummary ?? ''})`,

@@ -33,7 +33,8 @@ export function looker(): Looker {
       await page.getByText(loading, { exact: true }).first().waitFor({ state: 'hidden' });
     for (const [index, size] of sizes.entries()) {
       const isLast = index === sizes.length - 1;
-      await page.emulateMedia({ colorScheme: isLast ? 'dark' : 'light' });
+      // A colour on its way from day to night is neither: nothing moves while we look.
+      await page.emulateMedia({ colorScheme: isLast ? 'dark' : 'light', reducedMotion: 'reduce' });
       await page.setViewportSize(size);
       if (await sticksOut(page)) found.push(`${where} ${size.width}: sticks out to the right`);
       if (index > 0 && !isLast) continue;
