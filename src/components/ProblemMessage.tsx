@@ -26,8 +26,8 @@ export function ProblemMessage({ error, kept, next }: ProblemMessageProps) {
           ))}
         </ul>
       )}
-      <p className="m-0">{kept ?? t('app.kept')}</p>
-      <p className="m-0">{next ?? said.next}</p>
+      <p className="m-0 empty:hidden">{kept ?? t('app.kept')}</p>
+      <p className="m-0 empty:hidden">{next ?? said.next}</p>
     </div>
   );
 }

@@ -8,6 +8,7 @@ import { Button } from '../../components/Button';
 import { TextField } from '../../components/form/TextField';
 import { useErrorWords } from '../../components/form/useErrorWords';
 import { ProblemMessage } from '../../components/ProblemMessage';
+import { problemIn } from '../../components/problemWords';
 import { useWords } from '../../components/words';
 
 const signInForm = z.object({
@@ -43,7 +44,12 @@ export function SignInForm({ done }: { done: string | null }) {
         error={errorWords(errors.password)}
         {...form.register('password')}
       />
-      <ProblemMessage error={signIn.error} />
+      {/* A wrong password says by itself what to do: nobody is to sign in again first. */}
+      <ProblemMessage
+        error={signIn.error}
+        kept=""
+        {...(problemIn(signIn.error)?.status === 401 ? { next: '' } : {})}
+      />
       <Button type="submit" look="primary" busy={signIn.isPending} className="min-w-40">
         {t('app.signIn')}
       </Button>
