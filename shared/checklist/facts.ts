@@ -11,6 +11,8 @@ export type FerruleScheme = 'DIN 46228-4' | 'German old code' | 'French code';
 
 export interface ChecklistInput {
   panel: Panel;
+  /** The panel as it may stand: this revision and the last built one together. Absent: the panel itself. */
+  cabinet?: Panel;
   /** SHA-256 of the panel revision's canonical JSON. */
   panelDigest: string;
   ruleSet: string;
@@ -45,6 +47,7 @@ export interface IsolatorFacts extends PlannedIsolator {
 }
 
 export interface Facts extends ChecklistInput {
+  cabinet: Panel;
   /** In the order of the walk: modules by slot, terminals left to right. */
   points: PointFacts[];
   /** Groups of the scope, in the same order. */
@@ -53,6 +56,8 @@ export interface Facts extends ChecklistInput {
   /** In opening order, those of other energy last. */
   isolators: IsolatorFacts[];
   supply: (tag: string | undefined) => Supply | undefined;
+  /** Every description of a supply in the cabinet: two revisions may differ. */
+  described: (tag: string) => readonly Supply[];
   /** A point of the scope by its address. */
   worked: (address: string) => PointFacts | undefined;
   /** The terminals beside a terminal of a module in scope. */
@@ -110,7 +115,11 @@ export function factsOf(input: ChecklistInput): Facts {
   const known = new Map(points.map((each) => [each.point.address, each]));
   const lost = input.scope.find((address) => !known.has(address));
   if (lost !== undefined) throw new Error(`point ${lost} is not in the panel`);
-  const supplies = new Map(input.panel.supplies.map((supply) => [supply.tag, supply]));
+  const { panel, cabinet = panel } = input;
+  const described = new Map<string, Supply[]>();
+  for (const one of cabinet.supplies) described.set(one.tag, [...(described.get(one.tag) ?? []), one]);
+  // What this revision says of a supply comes first; what only the cabinet has is not lost.
+  const supplies = new Map([...cabinet.supplies, ...panel.supplies].map((supply) => [supply.tag, supply]));
   const modules = [...new Set(points.map(({ module }) => module))];
   const isolators = plannedIsolators(input);
   const stays = stayingFindings(
@@ -129,6 +138,7 @@ export function factsOf(input: ChecklistInput): Facts {
   for (const seed of seeds) byFamily.set(seed.family, [...(byFamily.get(seed.family) ?? []), seed]);
   return {
     ...input,
+    cabinet,
     points,
     groups: [...new Set(points.map(({ group }) => group))],
     modules,
@@ -137,6 +147,7 @@ export function factsOf(input: ChecklistInput): Facts {
     supply: (tag) => (tag === undefined ? undefined : supplies.get(tag)),
     worked: (address) => known.get(address),
     testsAt: (address) => tests.get(address) ?? [],
+    described: (tag) => described.get(tag) ?? [],
     provedDead: new Set(input.deadTests.filter(({ at }) => !('point' in at)).map(({ terminal }) => terminal)),
     stays,
     seeds: (family) => byFamily.get(family) ?? [],

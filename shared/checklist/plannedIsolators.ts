@@ -12,7 +12,7 @@ const asPlanned = (isolator: Isolator): PlannedIsolator => ({
 });
 
 /** @throws Error when a source of the plan names an isolator that the panel does not have. */
-export function plannedIsolators({ panel, plan }: ChecklistInput): IsolatorFacts[] {
+export function plannedIsolators({ panel, cabinet = panel, plan }: ChecklistInput): IsolatorFacts[] {
   const planned = new Map(plan.isolators.map((each) => [each.isolator.tag, each]));
   const held = new Map<string, Source>();
   for (const source of plan.otherEnergy)
@@ -25,7 +25,7 @@ export function plannedIsolators({ panel, plan }: ChecklistInput): IsolatorFacts
       restoredIn: each.isolator.purpose === 'motive' ? 'restore-motion' : 'close',
     }));
   const others = [...held].map(([tag, holds]): IsolatorFacts => {
-    const isolator = panel.isolators.find((each) => each.tag === tag);
+    const isolator = cabinet.isolators.find((each) => each.tag === tag);
     if (!isolator)
       throw new Error(`source ${holds.tag} names isolator ${tag}, which the panel does not have`);
     return { ...(planned.get(tag) ?? asPlanned(isolator)), holds, restoredIn: 'restore-motion' };

@@ -16,7 +16,7 @@ const highest = (values: number[], otherwise: number) =>
   values.length > 0 ? Math.max(...values) : otherwise;
 
 /** Both functions of the meter are read everywhere, so the one no supply asks for is proved at its highest voltage here. */
-export function voltagesToProve({ panel }: Facts, tested: readonly KnownVoltage[]): KnownVoltage[] {
+export function voltagesToProve({ cabinet }: Facts, tested: readonly KnownVoltage[]): KnownVoltage[] {
   const most = highest(
     tested.map(({ V }) => V),
     0,
@@ -24,7 +24,7 @@ export function voltagesToProve({ panel }: Facts, tested: readonly KnownVoltage[
   const missing = (['ac', 'dc'] as const)
     .filter((kind) => !tested.some((each) => each.kind === kind))
     .map((kind) => {
-      const here = panel.supplies.filter((supply) => (supply.kind === 'dc') === (kind === 'dc'));
+      const here = cabinet.supplies.filter((supply) => (supply.kind === 'dc') === (kind === 'dc'));
       return {
         kind,
         V: highest(

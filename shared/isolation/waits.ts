@@ -58,14 +58,31 @@ export function waitOf(panel: Panel, supply: Supply): Wait | null {
   return bulk.dischargeS === undefined ? wait : { ...wait, statedS: bulk.dischargeS };
 }
 
+/** The longer of two: a time that one description cannot tell is not known. */
+const longer = (a: number | null, b: number | null): number | null =>
+  a === null || b === null ? null : Math.max(a, b);
+
+/** Two revisions may describe one supply differently: people wait once, for both. */
+function together(a: Wait, b: Wait): Wait {
+  const stated = Math.max(a.statedS ?? 0, b.statedS ?? 0);
+  const wait = { supply: a.supply, t60S: longer(a.t60S, b.t60S), t1S: longer(a.t1S, b.t1S) };
+  // A time that one description states says nothing of the other, which nobody could reckon.
+  const isStated = a.statedS !== undefined && b.statedS !== undefined;
+  const isKnown = wait.t60S !== null && stated > 0;
+  return isStated || isKnown ? { ...wait, statedS: stated } : wait;
+}
+
 /**
  * One wait for every worked supply with stored charge. A time is null when the file cannot tell it: then it is
  * measured and none is promised (unless the maker's stands in `statedS`).
  */
 export function waits(panel: Panel, scope: readonly string[]): Wait[] {
   const worked = workedSupplies(panel, scope);
-  return [...panel.supplies]
-    .filter((supply) => worked.has(supply.tag))
-    .sort((a, b) => asRead(a.tag, b.tag))
-    .flatMap((supply) => waitOf(panel, supply) ?? []);
+  const found = new Map<string, Wait>();
+  for (const supply of [...panel.supplies].sort((a, b) => asRead(a.tag, b.tag))) {
+    const wait = worked.has(supply.tag) ? waitOf(panel, supply) : null;
+    const known = found.get(supply.tag);
+    if (wait) found.set(supply.tag, known ? together(known, wait) : wait);
+  }
+  return [...found.values()];
 }

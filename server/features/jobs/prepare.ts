@@ -126,6 +126,7 @@ export function prepareJob(choice: JobChoice): PreparedJob {
   const pauses = waits(cabinet, scope);
   const made = {
     panel,
+    cabinet,
     panelDigest: choice.panelDigest,
     ruleSet: ruleSetVersion,
     scope,

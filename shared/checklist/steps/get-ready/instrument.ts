@@ -23,8 +23,8 @@ export function weakestTester({ sources, supplies }: Panel): Extract<Ask, { kind
   };
 }
 
-export function instrument({ panel, settings }: Facts): Step[] {
-  const tester = weakestTester(panel);
+export function instrument({ cabinet, settings }: Facts): Step[] {
+  const tester = weakestTester(cabinet);
   const each = { stage: 'get-ready', family: 'instrument', by: 'each' } as const;
   return [
     makeStep({

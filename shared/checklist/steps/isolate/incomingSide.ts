@@ -11,7 +11,7 @@ import type { Step } from '../../types';
 const functions = ['AC', 'DC'] as const;
 
 /** What can stand on its incoming side: everything that feeds a supply through it, at the voltages of those. */
-function fedThrough({ panel }: Facts, tag: string): { supply: string; known: KnownVoltage[] } {
+function fedThrough({ cabinet: panel }: Facts, tag: string): { supply: string; known: KnownVoltage[] } {
   const supplies = panel.supplies.filter(({ feeds }) => feeds.some(({ through }) => through.includes(tag)));
   const from = new Set(
     supplies.flatMap(({ feeds }) =>

@@ -1,4 +1,5 @@
 /** Every pair of every worked supply, common and foreign terminal, read as AC and as DC, in parts that a proved tester closes. */
+import { highestVolts } from '../../../isolation/highestVolts';
 import type { DeadTest, Pair } from '../../../isolation/types';
 import { say } from '../../../panel/says';
 import type { Where } from '../../../rules/finding';
@@ -77,10 +78,12 @@ function readings(facts: Facts, test: DeadTest, id: string): Step[] {
   );
 }
 
-const nominal = (facts: Facts, test: DeadTest): KnownVoltage => {
-  const supply = facts.supply(test.supply);
-  return { kind: supply?.kind === 'dc' ? 'dc' : 'ac', V: supply?.V ?? 0 };
-};
+/** Each voltage that the drawings give the supply; one they do not have counts as the highest there is. */
+function nominal(facts: Facts, { supply }: DeadTest): KnownVoltage[] {
+  const found = facts.described(supply);
+  if (found.length === 0) return [{ kind: 'ac', V: highestVolts(facts.cabinet) }];
+  return found.map(({ kind, V }) => ({ kind: kind === 'dc' ? 'dc' : 'ac', V }));
+}
 
 interface Part {
   tests: DeadTest[];
@@ -94,10 +97,10 @@ function inParts(facts: Facts, tests: DeadTest[]): Part[] {
     const last = parts.at(-1);
     const grown = last && {
       tests: [...last.tests, test],
-      known: [...last.known, nominal(facts, test)],
+      known: [...last.known, ...nominal(facts, test)],
     };
     if (grown && items(grown) <= partSize) return [...parts.slice(0, -1), grown];
-    return [...parts, { tests: [test], known: [nominal(facts, test)] }];
+    return [...parts, { tests: [test], known: nominal(facts, test) }];
   }, []);
 }
 
