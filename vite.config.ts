@@ -1,6 +1,7 @@
 /** Builds the client into dist/client: hashed chunks, the app's manifest and its service worker. */
 import { existsSync, readdirSync, rmSync, statSync } from 'node:fs';
 import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig, type Plugin } from 'vite';
@@ -32,9 +33,29 @@ const noteBuilt: Plugin = {
   },
 };
 
-export default defineConfig({
+const jsonSchemaFile = /zod\/v4\/core\/(to-json-schema|json-schema-processors)\.js$/;
+
+/** Zod's writers of JSON Schema: no page writes any, and a phone would load them before its first screen. */
+const withoutJsonSchema: Plugin = {
+  name: 'without-json-schema',
+  transform(code, id) {
+    if (!jsonSchemaFile.test(id)) return null;
+    const declared = code.matchAll(/^export (?:const|function) (\w+)/gm);
+    const named = code.matchAll(/^export \{ (\w+ as \w+) \};/gm);
+    const names = [...declared].map(([, name]) => `left as ${name}`);
+    const renamed = [...named].map(([, pair]) => `left as ${pair?.split(' as ')[1]}`);
+    const left = "const left = () => { throw new Error('JSON Schema is left out of the client'); };";
+    return { code: `${left}\nexport { ${[...names, ...renamed].join(', ')} };`, map: null };
+  },
+};
+
+// The package names only its development build, whose warnings no electrician reads.
+const routerBuild = fileURLToPath(new URL('./node_modules/react-router/dist/production/', import.meta.url));
+
+export default defineConfig(({ command }) => ({
   plugins: [
     react(),
+    withoutJsonSchema,
     tailwindcss(),
     noteBuilt,
     VitePWA({
@@ -73,10 +94,19 @@ export default defineConfig({
       },
     }),
   ],
+  resolve: {
+    alias:
+      command === 'build'
+        ? [
+            { find: /^react-router$/, replacement: `${routerBuild}index.mjs` },
+            { find: /^react-router\/dom$/, replacement: `${routerBuild}dom-export.mjs` },
+          ]
+        : [],
+  },
   // `npm run dev` says where the server listens.
   server: process.env.COLDLOOP_API
     ? { proxy: { '/api': process.env.COLDLOOP_API, '/dev': process.env.COLDLOOP_API } }
     : {},
   // Nothing inlined: the page's policy takes fonts and pictures from this server only.
   build: { outDir, emptyOutDir: false, manifest: true, target: 'es2022', assetsInlineLimit: 0 },
-});
+}));

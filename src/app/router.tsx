@@ -1,20 +1,27 @@
 import { createBrowserRouter, type PatchRoutesOnNavigationFunction } from 'react-router-dom';
 import { FaultPage } from './FaultPage';
-import { officeRoutes } from './officeRoutes';
 import { paths } from './paths';
 import { Root } from './Root';
 import { withServer } from './withServer';
 
 const pages = 'pages';
 const fieldPath = /^\/my(\/|$)/;
-let isFieldHere = false;
+const here = new Set<string>();
 
-/** The field screens arrive in their own bundle, with their routes, the first time one of them is opened. */
-const addField: PatchRoutesOnNavigationFunction = async ({ path, patch }) => {
-  if (isFieldHere || !fieldPath.test(path)) return;
-  const { fieldBranch } = await import('./fieldBranch');
-  isFieldHere = true;
-  patch(pages, fieldBranch);
+const branches = {
+  field: async () => (await import('./fieldBranch')).fieldBranch,
+  office: async () => [withServer((await import('./officeRoutes')).officeRoutes)],
+};
+
+/** Field and office screens arrive each in their own bundle, with their routes, the first time one is opened. */
+const addBranch: PatchRoutesOnNavigationFunction = async ({ path, patch }) => {
+  const name = fieldPath.test(path) ? 'field' : 'office';
+  if (here.has(name)) return;
+  const branch = await branches[name]();
+  // Another navigation may have brought it meanwhile.
+  if (here.has(name)) return;
+  here.add(name);
+  patch(pages, branch);
 };
 
 export const router = createBrowserRouter(
@@ -30,7 +37,6 @@ export const router = createBrowserRouter(
           children: [
             withServer([
               { path: paths.home, lazy: async () => ({ Component: (await import('./Home')).Home }) },
-              ...officeRoutes,
             ]),
             { path: '*', lazy: async () => ({ Component: (await import('./NotFound')).NotFound }) },
           ],
@@ -38,5 +44,5 @@ export const router = createBrowserRouter(
       ],
     },
   ],
-  { patchRoutesOnNavigation: addField },
+  { patchRoutesOnNavigation: addBranch },
 );
