@@ -99,7 +99,7 @@ describe('the field under axe', () => {
       await page.keyboard.press('Escape');
       await page.getByRole('dialog').waitFor({ state: 'hidden' });
     };
-    for (const key of ['field.more', 'field.stop.short', 'field.hold.cant'] as const) {
+    for (const key of ['field.more', 'field.stop.title', 'field.hold.cant'] as const) {
       await press(page, key);
       await look(`sheet: ${key}`);
       await close();
