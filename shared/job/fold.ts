@@ -19,7 +19,7 @@ export function foldJob(checklist: Checklist, given: readonly unknown[], facts: 
   const personOf = (log: string) => facts.logs[log] ?? '';
   const counting = entries.filter(({ log }) => onJob.has(personOf(log)));
   const logs = logsOf(counting, personOf);
-  const holes = holesOf(counting);
+  const holes = holesOf(entries, counting);
   const replayed = replay(settingOf(checklist, facts, logs, holes), inOrder(logs), logs.length);
   return stateOf({ replayed, scope: checklist.scope, entries, logs, holes, twice });
 }

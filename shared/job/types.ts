@@ -140,8 +140,8 @@ export interface JobState {
   dangers: string[];
   /** Everybody who took part in the work: none of them countersigns it. */
   tookPart: string[];
-  /** Parents named by an entry and held nowhere: `log` heard to `seq`. */
-  gaps: { log: string; seq: number }[];
+  /** Parents named by an entry and held nowhere: `log` heard to `seq`; `person` is empty for an unknown owner. */
+  gaps: { log: string; person: string; seq: number }[];
   forks: { log: string; entries: string[] }[];
   /** Kinds this version does not know: what depends on them stays shut. */
   unknown: { entry: string; kind: string }[];

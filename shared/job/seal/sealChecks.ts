@@ -53,6 +53,14 @@ function samePerson({ state }: SealFacts): Text['params'] {
   return isOne ? { name: nameOf(state, person) } : undefined;
 }
 
+/** A log that somebody has heard of and that is not whole here: whose phone it is, and how far it was heard. */
+function gap({ state }: SealFacts): Text['params'] {
+  const [first] = state.gaps;
+  if (!first) return undefined;
+  const more = new Set(state.gaps.map(({ log }) => log)).size - 1;
+  return { name: nameOf(state, first.person), seq: first.seq, more };
+}
+
 export const sealChecks: readonly SealCheck[] = [
   { name: 'cancelled', against: ({ state }) => when(state.status === 'cancelled') },
   {
@@ -71,7 +79,7 @@ export const sealChecks: readonly SealCheck[] = [
     name: 'contradiction',
     against: ({ state: { contradictions } }) => contradictions[0] && { what: contradictions[0].says },
   },
-  { name: 'gap', against: ({ state }) => some(state.gaps.length) },
+  { name: 'gap', against: gap },
   { name: 'unknown-kind', against: ({ state }) => some(state.unknown.length) },
   { name: 'lock-on', against: lockOn },
   {

@@ -71,7 +71,7 @@ export function stateOf(folded: Folded): JobState {
     clear: workers.filter((person) => isClear(view, person)),
     dangers: [...view.dangers.keys()].sort((a, b) => a - b).flatMap((step) => lookup.steps[step]?.id ?? []),
     tookPart: [...view.hands].sort(),
-    gaps: holes.map(({ log, heard }) => ({ log, seq: heard })),
+    gaps: holes.map(({ log, heard }) => ({ log, person: view.setting.facts.logs[log] ?? '', seq: heard })),
     forks: forksOf(folded),
     unknown: view.unreadable.map(({ entry }) => ({ entry: entry.id, kind: entry.kind })),
     notes: notes(placed),

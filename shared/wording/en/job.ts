@@ -50,7 +50,8 @@ export const job = {
   'job.seal.step-open': 'This step is still open: {step}',
   'job.seal.hold-undecided': '{n, plural, one {One hold waits} other {# holds wait}} for the foreman.',
   'job.seal.contradiction': 'Two reports cannot both be true. {what}',
-  'job.seal.gap': '{n, plural, one {One phone has} other {# phones have}} reports that never arrived.',
+  'job.seal.gap':
+    'Reports on the phone of {name} have not arrived: heard to {seq}.{more, plural, =0 {} one { One more phone is missing some.} other { # more phones are missing some.}}',
   'job.seal.unknown-kind':
     '{n, plural, one {One report is} other {# reports are}} of a kind that this version cannot read.',
   'job.seal.lock-on': 'Lock {lock} of {name} is still on {isolator}.',

@@ -53,7 +53,7 @@ export const job = {
     '{n, plural, one {Una retención espera} other {# retenciones esperan}} al encargado.',
   'job.seal.contradiction': 'Dos avisos no pueden ser ciertos a la vez. {what}',
   'job.seal.gap':
-    '{n, plural, one {Un teléfono tiene} other {# teléfonos tienen}} avisos que nunca llegaron.',
+    'No han llegado todos los avisos del teléfono de {name}: recibidos hasta el {seq}.{more, plural, =0 {} one { Falta algo de un teléfono más.} other { Falta algo de # teléfonos más.}}',
   'job.seal.unknown-kind':
     '{n, plural, one {Hay un aviso de una clase} other {Hay # avisos de una clase}} que esta versión no puede leer.',
   'job.seal.lock-on': 'El candado {lock} de {name} sigue puesto en {isolator}.',

@@ -116,7 +116,7 @@ describe('the fold', () => {
     job.write(mara, 'note', { words: 'Two' });
     const held = job.entries.filter((entry) => entry !== last);
     const state = foldJob(checklist, held, job.facts);
-    expect(state.gaps).toEqual([{ log, seq: last.seq - 1 }]);
+    expect(state.gaps).toEqual([{ log, person: mara.id, seq: last.seq - 1 }]);
     expect(isOpen(job, terminal, held)).toBe(false);
     expect(isOpen(job, terminal)).toBe(true);
   });
