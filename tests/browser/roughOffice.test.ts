@@ -132,6 +132,7 @@ describe('rough handling at the desk', () => {
   it('panel files that are none: words, binary, another shape, too big; nothing is stored', async () => {
     const page = await as('nora');
     await page.goto(paths.panels);
+    await page.locator('tbody tr').first().waitFor();
     const rows = await page.locator('tbody tr').count();
     await choose(page, 'words.json', Buffer.from('not JSON at all'));
     await says(page, 'office.panel.file.not-json', { name: 'words.json' });
