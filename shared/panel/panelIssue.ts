@@ -19,6 +19,31 @@ function duplicates(values: string[], path: string, field: string): PanelProblem
   });
 }
 
+const namesOfPoles = (kind: Panel['supplies'][number]['kind']): string[] => {
+  if (kind === 'dc') return ['minus,plus'];
+  return kind === 'ac1' ? ['L,N', 'L1,L2'] : ['L1,L2,L3', 'L1,L2,L3,N'];
+};
+
+/** A pole without a terminal of its own is never read dead. */
+function polesThatDoNotFit({ supplies }: Panel): PanelProblem[] {
+  return supplies.flatMap(({ kind, terminals }, index) => {
+    const path = `supplies.${index}.terminals`;
+    const poles = Object.entries<string | undefined>(terminals).filter(([, tag]) => tag !== undefined);
+    const allowed = namesOfPoles(kind);
+    const isFit = allowed.includes(
+      poles
+        .map(([pole]) => pole)
+        .sort()
+        .join(),
+    );
+    const isShared = new Set(poles.map(([, tag]) => tag)).size < poles.length;
+    return [
+      ...(isFit ? [] : [{ path, says: `a supply of kind ${kind} has the poles ${allowed.join(' or ')}` }]),
+      ...(isShared ? [{ path, says: 'two poles stand on one terminal' }] : []),
+    ];
+  });
+}
+
 /**
  * Every reason why this panel cannot be issued as a revision; an empty list means that it can.
  * Tags are unique in their kind, addresses unique, every reference resolves, `otherSupply` is stated everywhere.
@@ -80,5 +105,5 @@ export function panelProblems(panel: Panel): PanelProblem[] {
     if (point.device.kind === 'ssr-control')
       refer(`points.${i}.device.load.supply`, point.device.load.supply, supplies, 'supply');
   });
-  return problems;
+  return [...problems, ...polesThatDoNotFit(panel)];
 }

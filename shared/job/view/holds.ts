@@ -13,9 +13,13 @@ type Decided = BodyOf<'hold-decided'>['decision'];
 // Of two foremen who decided at once, the one who asks for more work counts.
 const strictest: readonly Decided[] = ['rework', 'out-of-scope', 'accept'];
 
+/** The right panel, a fit tester and an isolator closed by hand: no words of a foreman stand for these. */
+const isNeverAccepted = ({ ask: { kind } }: Step): boolean =>
+  kind === 'scan' || kind === 'instrument' || kind === 'close';
+
 /** What isolates or proves is never accepted away; a point that will not read dead can leave the job. */
 function decisionsFor(step: Step | undefined): readonly Decided[] {
-  if (!step || isIsolating(step)) return ['rework'];
+  if (!step || isIsolating(step) || isNeverAccepted(step)) return ['rework'];
   return isProving(step) ? ['rework', 'out-of-scope'] : strictest;
 }
 

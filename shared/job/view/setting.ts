@@ -27,5 +27,6 @@ export function settingOf(
     workers: withPart(facts, 'electrician'),
     foremen: withPart(facts, 'foreman'),
     unsureUpTo: logs.map((log) => unsureIn(log, holes)),
+    ownerOf: logs.map(({ person }) => person),
   };
 }

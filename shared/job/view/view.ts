@@ -55,6 +55,8 @@ export interface Setting {
   foremen: readonly string[];
   /** Log number → numbers that a proof of its owner must come after: holes and forks. */
   unsureUpTo: readonly number[];
+  /** Log number → whose it is. */
+  ownerOf: readonly string[];
 }
 
 export interface View {
