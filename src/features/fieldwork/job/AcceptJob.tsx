@@ -1,5 +1,5 @@
-import { FieldButton } from '../../../components/field/FieldButton';
 import { useWords } from '../../../components/words';
+import { SaveButton } from '../answers/SaveButton';
 import { NotSaved } from './NotSaved';
 import { useSave } from './useSave';
 
@@ -10,14 +10,9 @@ export function AcceptJob() {
   return (
     <>
       <NotSaved code={failed} />
-      <FieldButton
-        look="primary"
-        className="min-h-[3.75rem] text-[1.2rem]"
-        disabled={saving}
-        onClick={() => void save('accepted', {})}
-      >
+      <SaveButton saving={saving} onSave={() => save('accepted', {})}>
         {t('field.job.accept')}
-      </FieldButton>
+      </SaveButton>
     </>
   );
 }
