@@ -11,7 +11,9 @@ const mostKnownChoices = 500;
 /** A choice of good answers and bad ones, by their names under `checklist.choice`. */
 export function choice(good: readonly string[], bad: readonly string[], params?: Text['params']): Ask {
   // The same few choices stand in thousands of steps: they are made once and shared.
-  const name = `${good.join()}/${bad.join()}${params ? JSON.stringify(params) : ''}`;
+  const values =
+    good.length === 1 && bad.length === 1 ? `${good[0]}/${bad[0]}` : `${good.join()}/${bad.join()}`;
+  const name = params ? values + JSON.stringify(params) : values;
   const known = knownChoices.get(name);
   if (known) return known;
   const option = (ok: boolean) => (value: string) => ({

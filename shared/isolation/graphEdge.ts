@@ -7,9 +7,9 @@ export interface Edge {
   from: NodeId;
   to: NodeId;
   /** Tags passed between the two, for the path a person reads. */
-  via: string[];
+  via: readonly string[];
   /** Isolators that stop the energy here when open. */
-  cuts: string[];
+  cuts: readonly string[];
   /** True when the energy may pass (back-feed, something nobody stated), not when it surely does. */
   maybe: boolean;
 }
@@ -29,11 +29,13 @@ export const node = {
 /** The tag of a node, without its kind. */
 export const tagOf = (id: NodeId): string => id.slice(id.indexOf(':') + 1);
 
+// Most edges pass nothing: they share one empty list.
+const nothing: readonly string[] = [];
+
 export const edge = (from: NodeId, to: NodeId, more: Partial<Edge> = {}): Edge => ({
   from,
   to,
-  via: [],
-  cuts: [],
-  maybe: false,
-  ...more,
+  via: more.via ?? nothing,
+  cuts: more.cuts ?? nothing,
+  maybe: more.maybe ?? false,
 });

@@ -14,7 +14,7 @@ export interface Circuit {
   switchedBy: DigitalOutput['technology'] | 'ssr';
   supply: Supply;
   volts: Volts;
-  loads: DrawnLoad[];
+  loads: readonly DrawnLoad[];
   suppressor?: Suppressor;
   suppressorPath: string;
   /** What the module has built in across its output. */

@@ -36,11 +36,21 @@ function drawn(device: Device, path: string): DrawnLoad[] {
   ];
 }
 
+// Most output rules ask for them: put together once a place.
+const known = new WeakMap<PointPlace, readonly DrawnLoad[]>();
+
 /** The point's device and those in parallel with it. Devices in series are contacts and drops, not loads. */
-export const drawnLoads = ({ point, path }: PointPlace): DrawnLoad[] => [
-  ...drawn(point.device, `${path}.device`),
-  ...(point.parallel ?? []).flatMap((device, index) => drawn(device, `${path}.parallel.${index}`)),
-];
+export function drawnLoads(place: PointPlace): readonly DrawnLoad[] {
+  const reckoned = known.get(place);
+  if (reckoned) return reckoned;
+  const { point, path } = place;
+  const loads = [
+    ...drawn(point.device, `${path}.device`),
+    ...(point.parallel ?? []).flatMap((device, index) => drawn(device, `${path}.parallel.${index}`)),
+  ];
+  known.set(place, loads);
+  return loads;
+}
 
 /** A spare terminal with nothing on it. */
 export const isUnused = ({ point }: PointPlace): boolean => point.spare === true && !isConnected(point);

@@ -14,7 +14,7 @@ import { atOutput } from './outputPlace';
 const id = 'output.leakage-holds';
 
 /** Rated volts over rated amps, as wiring.md asks; a coil's true impedance when it is out is lower. */
-const loadOhm = (loads: DrawnLoad[]): number => inParallel(...loads.map(({ V, A }) => V / A));
+const loadOhm = (loads: readonly DrawnLoad[]): number => inParallel(...loads.map(({ V, A }) => V / A));
 
 interface OffLimit {
   V: number;

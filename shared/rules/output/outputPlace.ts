@@ -21,13 +21,20 @@ export interface OutputGroup extends Fed {
   place: GroupPlace;
 }
 
+// Every output rule asks at the same places: what they ask is put together once a place.
+const known = new WeakMap<PointPlace, OutputPlace>();
+
 /** Asks at a point of a digital output; answers nothing elsewhere, and `missing` where the supply is unknown. */
 export function atOutput(place: PointPlace, ask: (at: OutputPlace) => Outcome[]): Outcome[] {
+  const built = known.get(place);
+  if (built) return ask(built);
   const { group, module, supply, volts, path } = place;
   if (!group || module?.io.kind !== 'digital-output') return [];
   if (!supply || !volts) return [missing(`${group.path}.supply`)];
   const ioPath = `modules.${module.tag}.io`;
-  return ask({ place, path, group, module, io: module.io, ioPath, supply, volts });
+  const at = { place, path, group, module, io: module.io, ioPath, supply, volts };
+  known.set(place, at);
+  return ask(at);
 }
 
 /** The same for a group of digital outputs. */
