@@ -22,6 +22,7 @@ export const records = {
   'records.countersignedBy': 'Countersigned by',
   'records.exceptions': 'Exceptions',
   'records.exceptions.none': 'none',
+  'records.exceptions.then': 'Then: {answers}.',
   'records.exceptions.n': '{n, plural, one {# exception} other {# exceptions}}',
   'records.amendment': 'amendment',
   'records.amendedBy': 'Amended by {numbers}. Read both.',

@@ -24,6 +24,7 @@ export const records = {
   'records.countersignedBy': 'Visado por',
   'records.exceptions': 'Excepciones',
   'records.exceptions.none': 'ninguna',
+  'records.exceptions.then': 'Después: {answers}.',
   'records.exceptions.n': '{n, plural, one {# excepción} other {# excepciones}}',
   'records.amendment': 'enmienda',
   'records.amendedBy': 'Enmendado por {numbers}. Lea ambos.',

@@ -1,4 +1,5 @@
 import type { RecordDocument } from '../../../shared/api/recordDocument';
+import { recordExceptions } from '../../../shared/api/recordExceptions';
 import { Moment } from '../../components/Moment';
 import { SheetSection } from '../../components/sheet/SheetSection';
 import { useWords } from '../../components/words';
@@ -13,11 +14,38 @@ export function ExceptionsSection({ document }: { document: RecordDocument }) {
     ...document.drawingDiffers.map((each) => ({ ...each, what: t('records.drawingDiffers'), shown: null })),
     ...document.notes.map((each) => ({ ...each, what: t('records.note'), shown: null })),
   ];
-  const none = document.findings.length + document.holds.length + rounds.length + said.length === 0;
+  const answers = recordExceptions(document);
+  const removed = document.lockOut.filter(({ removedBy }) => removedBy !== null);
+  const none =
+    answers.length +
+      removed.length +
+      document.findings.length +
+      document.holds.length +
+      rounds.length +
+      said.length ===
+    0;
   return (
     <SheetSection title={t('records.exceptions')}>
       {none && <p className="m-0">{t('records.exceptions.none')}</p>}
       <ul className="m-0 list-none p-0">
+        {answers.map(({ verdict, shown, between, answer, person, at, then }) => (
+          <li key={`${shown ?? between?.join()} ${answer} ${at}`} className="border-b border-rule py-2">
+            <strong>{t(`records.verdict.${verdict}`)}</strong>{' '}
+            {shown ?? `${t('records.deadTests')}, ${between?.join(' – ') ?? ''}`}: {answer}. {person},{' '}
+            <Moment at={at} form="exact" />
+            {then.length > 0 && (
+              <span className="block">{t('records.exceptions.then', { answers: then.join(', ') })}</span>
+            )}
+          </li>
+        ))}
+        {removed.map(({ isolator, lock, person, onAt, removedBy }) => (
+          <li key={`${isolator} ${lock} ${onAt}`} className="border-b border-rule py-2">
+            <strong>
+              {t('records.lock')} {lock}
+            </strong>{' '}
+            {isolator}, {person}: {t('records.removedBy', { name: removedBy ?? '' })}
+          </li>
+        ))}
         {rounds.map((round) => (
           <li key={round.number} className="border-b border-rule py-2">
             <strong>{t('records.roundN', { n: round.number })}</strong> {round.words} (

@@ -1,23 +1,15 @@
 /** What did not go as planned: first in the record, so that nobody has to look for it. */
+import { recordExceptions } from '../../../../shared/api/recordExceptions';
 import type { Printing } from './printed';
 
 type Line = readonly [what: string, words: string];
 
-const outLines = ({ document, words: { t, at } }: Printing): Line[] =>
-  [...document.points.flatMap(({ answers }) => answers), ...document.steps]
-    .filter(({ verdict }) => verdict !== 'ok')
-    .map(({ verdict, shown, answer, person, at: when }) => [
-      t(`records.verdict.${verdict}`),
-      `${shown}: ${answer}. ${person}, ${at(when)}`,
-    ]);
-
-const deadLines = ({ document, words: { t, at } }: Printing): Line[] =>
-  document.deadTests
-    .filter(({ verdict }) => verdict !== 'ok')
-    .map(({ verdict, terminal, second, value, unit, person, at: when }) => [
-      t(`records.verdict.${verdict}`),
-      `${t('records.deadTests')}, ${terminal} – ${second}: ${value} ${unit}. ${person}, ${at(when)}`,
-    ]);
+const answerLines = ({ document, words: { t, at } }: Printing): Line[] =>
+  recordExceptions(document).map(({ verdict, shown, between, answer, person, at: when, then }) => [
+    t(`records.verdict.${verdict}`),
+    `${shown ?? `${t('records.deadTests')}, ${between?.join(' – ') ?? ''}`}: ${answer}. ${person}, ${at(when)}` +
+      (then.length > 0 ? ` ${t('records.exceptions.then', { answers: then.join(', ') })}` : ''),
+  ]);
 
 const lockLines = ({ document, words: { t } }: Printing): Line[] =>
   document.lockOut
@@ -77,8 +69,8 @@ const saidLines = ({ document, words: { t, at } }: Printing): Line[] => [
 export function exceptionsSection(printing: Printing): void {
   const { sheet, words } = printing;
   sheet.heading(words.t('records.exceptions'), 2);
-  const lines = [outLines, deadLines, lockLines, roundLines, holdLines, saidLines, findingLines].flatMap(
-    (of) => of(printing),
+  const lines = [answerLines, lockLines, roundLines, holdLines, saidLines, findingLines].flatMap((of) =>
+    of(printing),
   );
   if (lines.length === 0) sheet.paragraph(words.t('records.exceptions.none'));
   for (const [what, says] of lines) sheet.paragraph(`${what}  ${says}`);
