@@ -8,6 +8,7 @@ import {
   panelView,
   revisionView,
   type Acceptance,
+  revisionRow,
 } from '../../shared/api/panels';
 import type { Panel } from '../../shared/panel/panelSchema';
 import { nextPage } from './nextPage';
@@ -98,7 +99,7 @@ export function useIssueRevision(panel: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: { version: number; acceptances: Acceptance[] }) =>
-      request(done, `/api/panels/${panel}/revisions`, { method: 'POST', body, timeoutMs: 60_000 }),
+      request(revisionRow, `/api/panels/${panel}/revisions`, { method: 'POST', body, timeoutMs: 60_000 }),
     onSuccess: () =>
       Promise.all([
         client.invalidateQueries({ queryKey: ['panel', panel] }),

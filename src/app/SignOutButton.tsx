@@ -1,9 +1,9 @@
 import { useState } from 'react';
-import { useNavigate } from 'react-router-dom';
 import { useSignOut } from '../api/session';
 import { Button } from '../components/Button';
 import { ButtonLink } from '../components/ButtonLink';
 import { Dialog } from '../components/Dialog';
+import { setHere } from '../components/field/here';
 import { useWords } from '../components/words';
 import { paths } from './paths';
 import { unsentHere } from './unsentHere';
@@ -12,13 +12,17 @@ import { unsentHere } from './unsentHere';
 export function SignOutButton() {
   const { t } = useWords();
   const signOut = useSignOut();
-  const navigate = useNavigate();
   const [unsent, setUnsent] = useState(0);
   const [sending, setSending] = useState(false);
+  // Whoever signs in next starts at their own work, and is asked for their own PIN.
+  const left = () => {
+    setHere(null);
+    window.location.assign(paths.signIn);
+  };
   async function leave() {
     const waiting = await unsentHere();
     if (waiting > 0) setUnsent(waiting);
-    else signOut.mutate(undefined, { onSuccess: () => void navigate(paths.signIn) });
+    else signOut.mutate(undefined, { onSuccess: left });
   }
   async function send() {
     setSending(true);

@@ -46,7 +46,7 @@ export function Dialog({ open, title, onClose, actions, closeWords, children }: 
         {title}
       </h2>
       <div className="px-5 py-4">{children}</div>
-      <div className="flex flex-wrap justify-end gap-3 border-t border-rule px-5 py-3">
+      <div className="sticky bottom-0 flex flex-wrap justify-end gap-3 border-t border-rule bg-sheet px-5 py-3">
         <Button onClick={onClose}>{closeWords ?? t('app.close')}</Button>
         {actions}
       </div>

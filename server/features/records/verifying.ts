@@ -48,9 +48,9 @@ export class RecordVerifying {
 
   private async find(digest: string): Promise<Found | undefined> {
     const rows = await this.database.query<Found[]>(
-      `SELECT r.site, r.number, r.job, r.panel_tag, r.sealed_at, r.content, r.digest, r.digest <> $1 AS by_pdf
+      `SELECT r.site, r.number, r.job, r.panel_tag, r.sealed_at, r.content, r.digest, p.sha256 = $1 AS by_pdf
        FROM record r LEFT JOIN record_pdf p ON p.record = r.id
-       WHERE r.digest = $1 OR p.sha256 = $1 ORDER BY r.number LIMIT 1`,
+       WHERE r.digest = $1 OR r.seal = $1 OR p.sha256 = $1 ORDER BY r.number LIMIT 1`,
       [digest],
     );
     return rows[0];

@@ -9,7 +9,7 @@ export const app = {
   'app.pageOf': '{page} of {pages}',
   'app.pageOpen': 'page {page}',
   'app.close': 'Close',
-  'app.cancel': 'Leave it as it is',
+  'app.cancel': 'Cancel',
   'app.save': 'Save',
   'app.saved': 'Saved.',
   'app.back': 'Back',
@@ -58,7 +58,7 @@ export const app = {
   'app.reload': 'Load again',
   'app.signOut.refused': 'You cannot sign out yet',
   'app.signOut.unsent':
-    '{n, plural, one {# answer on this device is not sent yet. It is safe here.} other {# answers on this device are not sent yet. They are safe here.}}',
+    '{n, plural, one {# answer on this device is not sent yet. It is kept here.} other {# answers on this device are not sent yet. They are kept here.}}',
   'app.signOut.next': 'Send them, or save them as a file on the page This device. Then sign out.',
   'app.signOut.send': 'Send now',
   'app.signIn.email': 'E-mail',

@@ -106,7 +106,7 @@ export const office = {
   'office.point.group': 'Group',
   'office.point.what': 'What it is',
   'office.point.device': 'Field device',
-  'office.point.otherSupply': 'Other supply',
+  'office.point.otherSupply': 'Supply besides its group’s',
   'office.point.notStated': 'not stated',
   'office.point.noOther': 'none',
   'office.device.contact': 'dry contact',
@@ -230,6 +230,10 @@ export const office = {
   'office.new.accept':
     'Some findings on these points are accepted by nobody yet. Mend them in the panel, or accept each with your reason. An accepted one adds a step to the checklist.',
   'office.new.nothingToAccept': 'No finding on these points is left to accept.',
+  'office.new.done.sent': 'The job is sent. Its people get it with their next signal.',
+  'office.new.done.planned': 'The job is planned. Send it when it is time.',
+  'office.new.so.far': '{tag}: {points, plural, one {# point} other {# points}}',
+  'office.issue.done': 'Revision {n} is issued. Jobs can be made from it.',
   'office.new.kept': 'What you chose and typed is kept in this tab.',
   'office.new.planned': 'The job is kept as planned; only the sending failed.',
   'office.new.planOnly': 'Keep it as planned',
@@ -257,7 +261,7 @@ export const office = {
   'office.people.changeName': 'Change {name}',
   'office.people.active': 'May use Coldloop',
   'office.people.self': 'You cannot switch yourself off.',
-  'office.people.switchOff': 'Switch off',
+  'office.people.switchOff': 'Take away access',
   'office.people.off.consequence':
     '{name} is signed out everywhere at once and cannot sign in. What they did stays on record. Answers still on their phone can be delivered, but locks in them must be confirmed. Anything else you changed here is saved with it.',
   'office.sites.new': 'Add a site',

@@ -11,7 +11,7 @@ export const app = {
   'app.pageOf': '{page} de {pages}',
   'app.pageOpen': 'página {page}',
   'app.close': 'Cerrar',
-  'app.cancel': 'Dejarlo como está',
+  'app.cancel': 'Cancelar',
   'app.save': 'Guardar',
   'app.saved': 'Guardado.',
   'app.back': 'Atrás',

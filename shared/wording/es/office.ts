@@ -108,7 +108,7 @@ export const office = {
   'office.point.group': 'Grupo',
   'office.point.what': 'Qué es',
   'office.point.device': 'Aparato de campo',
-  'office.point.otherSupply': 'Otra alimentación',
+  'office.point.otherSupply': 'Alimentación además de la de su grupo',
   'office.point.notStated': 'sin indicar',
   'office.point.noOther': 'ninguna',
   'office.device.contact': 'contacto seco',
@@ -233,6 +233,10 @@ export const office = {
   'office.new.accept':
     'Algunos hallazgos de estos puntos no los ha aceptado nadie. Corríjalos en el tablero o acepte cada uno con su motivo. Cada hallazgo aceptado añade un paso a la lista.',
   'office.new.nothingToAccept': 'No queda ningún hallazgo por aceptar en estos puntos.',
+  'office.new.done.sent': 'El trabajo está enviado. Su gente lo recibe con la próxima señal.',
+  'office.new.done.planned': 'El trabajo está planificado. Envíelo cuando toque.',
+  'office.new.so.far': '{tag}: {points, plural, one {# punto} other {# puntos}}',
+  'office.issue.done': 'La revisión {n} está emitida. Ya se pueden hacer trabajos con ella.',
   'office.new.kept': 'Lo que eligió y escribió se conserva en esta pestaña.',
   'office.new.planned': 'El trabajo queda planificado; solo falló el envío.',
   'office.new.planOnly': 'Dejarlo planificado',
@@ -261,7 +265,7 @@ export const office = {
   'office.people.changeName': 'Cambiar a {name}',
   'office.people.active': 'Puede usar Coldloop',
   'office.people.self': 'No puede desactivarse a sí mismo.',
-  'office.people.switchOff': 'Desactivar',
+  'office.people.switchOff': 'Quitar el acceso',
   'office.people.off.consequence':
     'Se cierra la sesión de {name} en todas partes y no podrá entrar. Lo que hizo queda registrado. Las respuestas que sigan en su teléfono se pueden entregar, pero sus bloqueos deben confirmarse. Lo demás que cambió aquí se guarda también.',
   'office.sites.new': 'Añadir una planta',

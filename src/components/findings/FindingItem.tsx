@@ -1,25 +1,15 @@
 import type { ReactNode } from 'react';
 import type { FindingView } from '../../../shared/api/panels';
-import { formatNumber } from '../../../shared/wording/renderWith';
 import { useWords } from '../words';
 import { HarmMark } from './HarmMark';
 import { SumTable } from './SumTable';
 import { WhereTags } from './WhereTags';
 
-const shown = (value: number | string) => (typeof value === 'number' ? formatNumber(value) : value);
-
 function Remedy({ remedy }: { remedy: NonNullable<FindingView['remedy']> }) {
   const { t } = useWords();
-  const values = Object.entries(remedy.values ?? {});
   return (
-    <p className="mt-2 mb-0">
+    <p className="mt-2 mb-0 max-w-[66ch]">
       <strong>{t('office.remedy')}</strong> {remedy.says}
-      {values.length > 0 && (
-        <span className="font-mono text-sm">
-          {' '}
-          ({values.map(([name, value]) => `${name} ${shown(value)}`).join(', ')})
-        </span>
-      )}
     </p>
   );
 }

@@ -16,6 +16,7 @@ export const JobNumber = ({ job }: { job: JobRow }) => (
 export const PanelName = ({ job }: { job: JobRow }) => (
   <>
     <strong className="font-mono">{job.panelTag}</strong> {job.panelName}
+    <span className="block text-sm text-muted">{job.electricians.map(({ name }) => name).join(', ')}</span>
   </>
 );
 

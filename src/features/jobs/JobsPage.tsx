@@ -1,3 +1,4 @@
+import { useLocation } from 'react-router-dom';
 import type { JobRow } from '../../../shared/api/jobs';
 import { paths } from '../../app/paths';
 import { useCurrentSite } from '../../api/currentSite';
@@ -74,6 +75,7 @@ export function JobsPage() {
   const { t } = useWords();
   const { site } = useCurrentSite();
   const jobs = useJobs(site?.id);
+  const { state } = useLocation() as { state: { made?: 'sent' | 'planned' } | null };
   return (
     <SheetPage
       title={t('app.tab.jobs')}
@@ -89,6 +91,11 @@ export function JobsPage() {
         </ButtonLink>
       }
     >
+      {state?.made && (
+        <p role="status" className="mt-0 border-l-8 border-ink bg-paper px-3 py-2 font-bold">
+          {t(`office.new.done.${state.made}`)}
+        </p>
+      )}
       <Answered query={jobs}>
         {(data) => <Board jobs={data.pages.flatMap((page) => page.items)} asOf={jobs.dataUpdatedAt} />}
       </Answered>

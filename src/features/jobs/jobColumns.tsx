@@ -25,7 +25,15 @@ const oldest = (job: JobRow): string => job.waiting.map((each) => each.since).so
 /** Deciding and countersigning are signed acts: they happen on the field screen, with the foreman's own key. */
 export const waitingColumns = (t: T): Column<JobRow>[] => [
   ...lead(t),
-  { head: t('office.needs'), cell: (job) => <WaitingFor job={job} /> },
+  {
+    head: t('office.needs'),
+    cell: (job) => (
+      <>
+        <WaitingFor job={job} />
+        {job.locks.length > 0 && <LocksOn job={job} />}
+      </>
+    ),
+  },
   { head: t('office.since'), className: 'md:w-[15%]', cell: (job) => <Moment at={oldest(job)} /> },
   last(t, (job) => {
     const sign = job.waiting.some((each) => each.what === 'countersign');

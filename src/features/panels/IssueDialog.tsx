@@ -20,10 +20,11 @@ interface IssueDialogProps {
   panel: PanelView;
   findings: FindingsAnswer;
   onClose: () => void;
+  onIssued: (revision: number) => void;
 }
 
 /** Issues the draft as a revision nobody can change: what may stand is accepted here, by name, with a reason. */
-export function IssueDialog({ panel, findings, onClose }: IssueDialogProps) {
+export function IssueDialog({ panel, findings, onClose, onIssued }: IssueDialogProps) {
   const { t } = useWords();
   const issue = useIssueRevision(panel.id);
   const [reasons, setReasons] = useState<Reasons>({});
@@ -35,7 +36,10 @@ export function IssueDialog({ panel, findings, onClose }: IssueDialogProps) {
     setTried(true);
     if (!complete) return;
     const acceptances = acceptancesOf(toAccept, reasons);
-    issue.mutate({ version: panel.draft.version, acceptances }, { onSuccess: onClose });
+    issue.mutate(
+      { version: panel.draft.version, acceptances },
+      { onSuccess: ({ number }) => onIssued(number) },
+    );
   };
   return (
     <Dialog

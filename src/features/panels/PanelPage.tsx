@@ -34,6 +34,7 @@ function PanelSheet({ panel, asOf }: { panel: PanelView; asOf: number }) {
   const session = useSession();
   const findings = useDraftFindings(panel.id, panel.draft.version, language);
   const [issuing, setIssuing] = useState(false);
+  const [issued, setIssued] = useState<number>();
   const draft = panel.draft.panel;
   const mayEdit = session.data ? holds(session.data, 'panel-engineer', panel.site) : false;
   return (
@@ -51,8 +52,14 @@ function PanelSheet({ panel, asOf }: { panel: PanelView; asOf: number }) {
         { label: t('office.panel'), value: draft.tag },
         { label: t('office.panel.drawing'), value: `${draft.drawing.number} ${draft.drawing.revision}` },
         { label: t('office.panel.draft'), value: panel.draft.version },
+        { label: t('office.panel.revision'), value: panel.revision ?? t('office.panel.neverIssued') },
       ]}
     >
+      {issued !== undefined && (
+        <p role="status" className="mt-0 border-l-8 border-ink bg-paper px-3 py-2 font-bold">
+          {t('office.issue.done', { n: issued })}
+        </p>
+      )}
       <p className="m-0 mb-6 text-muted">
         {draft.location} · {draft.practice} · {draft.frequencyHz} Hz
       </p>
@@ -68,7 +75,15 @@ function PanelSheet({ panel, asOf }: { panel: PanelView; asOf: number }) {
       </SheetSection>
       {mayEdit && <DraftUpload panel={panel} />}
       {findings.data && issuing && (
-        <IssueDialog panel={panel} findings={findings.data} onClose={() => setIssuing(false)} />
+        <IssueDialog
+          panel={panel}
+          findings={findings.data}
+          onClose={() => setIssuing(false)}
+          onIssued={(number) => {
+            setIssuing(false);
+            setIssued(number);
+          }}
+        />
       )}
     </SheetPage>
   );

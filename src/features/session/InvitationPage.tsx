@@ -4,6 +4,7 @@ import { z } from 'zod';
 import { invitationLook } from '../../../shared/api/people';
 import { paths } from '../../app/paths';
 import { request } from '../../api/request';
+import { useSignOut } from '../../api/session';
 import { SheetPage } from '../../components/sheet/SheetPage';
 import { useWords } from '../../components/words';
 import { BadLink } from './BadLink';
@@ -23,10 +24,13 @@ export function InvitationPage() {
     retry: false,
     staleTime: Infinity,
   });
+  // Somebody else may be signed in here: the invited person signs in as themselves.
+  const leave = useSignOut();
   const accept = useMutation({
     mutationFn: (password: string) =>
       request(z.unknown(), '/api/invitations/accept', { method: 'POST', body: { token, password } }),
-    onSuccess: () => navigate(`${paths.signIn}?done=invitation`),
+    onSuccess: () =>
+      leave.mutate(undefined, { onSettled: () => void navigate(`${paths.signIn}?done=invitation`) }),
   });
   return (
     <SheetPage title={t('app.invitation.title')}>

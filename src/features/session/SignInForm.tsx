@@ -5,6 +5,7 @@ import { z } from 'zod';
 import { paths } from '../../app/paths';
 import { useSignIn } from '../../api/session';
 import { Button } from '../../components/Button';
+import { setHere } from '../../components/field/here';
 import { TextField } from '../../components/form/TextField';
 import { useErrorWords } from '../../components/form/useErrorWords';
 import { ProblemMessage } from '../../components/ProblemMessage';
@@ -27,7 +28,10 @@ export function SignInForm({ done }: { done: string | null }) {
   });
   const { errors } = form.formState;
   return (
-    <form noValidate onSubmit={form.handleSubmit((values) => signIn.mutate(values))}>
+    <form
+      noValidate
+      onSubmit={form.handleSubmit((values) => signIn.mutate(values, { onSuccess: () => setHere(null) }))}
+    >
       {done === 'password' && <p role="status">{t('app.reset.done')}</p>}
       {done === 'invitation' && <p role="status">{t('app.invitation.done')}</p>}
       <TextField

@@ -54,7 +54,7 @@ function continuity(worked: PointFacts): Step[] {
 }
 
 export function loop(facts: Facts, worked: PointFacts): Step[] {
-  const { point } = worked;
+  const { point, supply } = worked;
   const { address, terminal } = point;
   const neighbours = facts.beside(worked.module.tag, terminal);
   const beside = (neighbour: string) =>
@@ -73,7 +73,7 @@ export function loop(facts: Facts, worked: PointFacts): Step[] {
     ...neighbours.map(beside),
     cold(worked, {
       id: `cold.${address}.polarity`,
-      title: say('checklist.cold.polarity', { terminal }),
+      title: say(`checklist.cold.polarity.${supply?.kind === 'dc' ? 'dc' : 'ac'}`, { terminal }),
       ask: choice(['ends-match'], ['ends-differ']),
       picture: worked.loop,
     }),

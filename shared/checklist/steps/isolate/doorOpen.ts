@@ -41,14 +41,14 @@ const guarded = ({ supply, guard, reason }: Facts['plan']['guarded'][number]): S
   });
 
 export function doorOpen(facts: Facts): Step[] {
-  const { plan } = facts;
+  const { plan, panel } = facts;
   const places = [...new Map(plan.cover.map((place) => [idOf(place), place])).values()];
   return [
     makeStep({
       id: 'isolate.door',
       stage: 'isolate',
       family: 'door-open',
-      title: say('checklist.isolate.door'),
+      title: say('checklist.isolate.door', { panel: panel.tag }),
       warnings: [{ signal: 'danger', says: say('checklist.warning.touch-nothing') }],
       ask: done('checklist.answer.open'),
     }),

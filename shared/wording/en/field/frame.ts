@@ -2,7 +2,7 @@ export const frame = {
   'field.app': 'Coldloop',
   'field.back': 'Back',
   'field.undo': 'Undo',
-  'field.cancel': 'Leave it as it is',
+  'field.cancel': 'Cancel',
   'field.close': 'Close',
   'field.save': 'Save',
   'field.saveValue': '{value}. Save',
@@ -24,15 +24,15 @@ export const frame = {
   'field.title.drawing': 'Drawing',
   'field.title.round': 'Round',
   'field.title.job': 'Job',
-  'field.pad.wipe': 'Wipe',
+  'field.pad.wipe': 'Clear',
   'field.pad.minus': 'Change the sign',
   'field.unsent.none': 'All answers are sent.',
   'field.unsent.some':
     'Saved on this phone. {n, plural, one {# answer not sent yet.} other {# answers not sent yet.}}',
   'field.unsent.noServer':
-    '{n, plural, one {# answer not sent: no server since {since}. It is safe here.} other {# answers not sent: no server since {since}. They are safe here.}}',
+    '{n, plural, one {# answer not sent: no server since {since}. It is kept here.} other {# answers not sent: no server since {since}. They are kept here.}}',
   'field.unsent.signIn':
-    '{n, plural, one {Sign in to send # answer. It is safe here.} other {Sign in to send # answers. They are safe here.}}',
+    '{n, plural, one {Sign in to send # answer. It is kept here.} other {Sign in to send # answers. They are kept here.}}',
   'field.unsent.attention':
     '{n, plural, one {The server did not take # answer. It is kept here. Look.} other {The server did not take # answers. They are kept here. Look.}}',
   'field.notSaved': 'Not saved. What you entered is still here.',

@@ -44,7 +44,7 @@ export const job = {
   'field.locks.noneKnown': 'No lock heard of',
   'field.locks.heard': 'Others last heard {at}.',
   'field.locks.neverHeard': 'Others not heard yet.',
-  'field.locks.here': 'Here:',
+  'field.locks.here': 'Go to:',
   'field.locks.you': 'you',
   'field.locks.onAt': 'on {at}',
   'field.locks.offAt': 'off {at}',

@@ -2,7 +2,7 @@ export const frame = {
   'field.app': 'Coldloop',
   'field.back': 'Atrás',
   'field.undo': 'Deshacer',
-  'field.cancel': 'Dejarlo como está',
+  'field.cancel': 'Cancelar',
   'field.close': 'Cerrar',
   'field.save': 'Guardar',
   'field.saveValue': '{value}. Guardar',
@@ -30,9 +30,9 @@ export const frame = {
   'field.unsent.some':
     'Guardado en este teléfono. {n, plural, one {# respuesta sin enviar.} other {# respuestas sin enviar.}}',
   'field.unsent.noServer':
-    '{n, plural, one {# respuesta sin enviar: sin servidor desde {since}. Está segura aquí.} other {# respuestas sin enviar: sin servidor desde {since}. Están seguras aquí.}}',
+    '{n, plural, one {# respuesta sin enviar: sin servidor desde {since}. Se conserva aquí.} other {# respuestas sin enviar: sin servidor desde {since}. Se conservan aquí.}}',
   'field.unsent.signIn':
-    '{n, plural, one {Entre para enviar # respuesta. Está segura aquí.} other {Entre para enviar # respuestas. Están seguras aquí.}}',
+    '{n, plural, one {Entre para enviar # respuesta. Se conserva aquí.} other {Entre para enviar # respuestas. Se conservan aquí.}}',
   'field.unsent.attention':
     '{n, plural, one {El servidor no aceptó # respuesta. Se conserva aquí. Mire.} other {El servidor no aceptó # respuestas. Se conservan aquí. Mire.}}',
   'field.notSaved': 'No se guardó. Lo que escribió sigue aquí.',

@@ -79,7 +79,9 @@ export function ReviewPage() {
         </ActionBar>
       }
     >
-      <h1 className="m-0 text-[1.55rem] leading-tight font-bold">{t('field.review.title')}</h1>
+      <h1 className="m-0 text-[1.55rem] leading-tight font-bold">
+        {t('field.review.title')} {job.pack.job.number}
+      </h1>
       {!gate.open && <Refusals head={t('field.review.not')} refusals={gate.refusals} />}
       <Signatures />
       <ChooseAnswers />

@@ -36,6 +36,11 @@ export function NewJobSteps({ site, me }: { site: string; me: string }) {
   return (
     <>
       <StepStrip current={draft.step} />
+      {draft.step !== 'panel' && revision.data && (
+        <p className="m-0 mb-4 font-bold">
+          {t('office.new.so.far', { tag: revision.data.panel.tag, points: draft.points.length })}
+        </p>
+      )}
       <div className="grid items-start gap-x-10 gap-y-6 lg:grid-cols-2">
         <div>
           {draft.step === 'panel' && <PanelStep site={site} draft={draft} change={change} />}

@@ -55,7 +55,7 @@ export function SendStep({ draft, change, preview }: SendStepProps) {
     await create.mutateAsync(body);
     if (andSend) await send.mutateAsync(body.id);
     forgetJobDraft();
-    await navigate(paths.jobs);
+    await navigate(paths.jobs, { state: { made: andSend ? 'sent' : 'planned' } });
   };
   // The mutations hold their own errors, which are shown below; the promise has nothing to add.
   const start = (andSend: boolean) => void make(andSend).catch(() => undefined);
