@@ -175,6 +175,15 @@ const goOn =
 const hearAll: Act = (turn) => {
   turn.hearAll();
 };
+const byForeman =
+  (act: Act): Act =>
+  (turn) => {
+    const foreman = turn.job.facts.people.find(({ part }) => part === 'foreman');
+    if (foreman) act(turn.as(foreman));
+  };
+const clearEverybody: Act = (turn) => {
+  for (const { id } of turn.job.facts.people) turn.write('clear', { person: id });
+};
 const relockOne: Act = (turn) => {
   const isolator = turn.isolator();
   turn.lockOff(isolator);
@@ -223,11 +232,11 @@ export const attacks: readonly Act[] = [
   chain(readLive, wireAnyway, readWell, wireAnyway),
   chain(testerFails, wireAnyway),
   chain(answerBadly, wireAnyway),
-  chain(doFirst, readTests, readTerminals, wireAnyway),
+  chain(doFirst, readTests, doFirst, readTerminals, wireAnyway),
   chain(round('break'), wireAnyway),
   chain(round('break'), doFirst, wireAnyway),
-  chain(round('break'), doFirst, readTests, wireAnyway),
-  chain(round('break'), doFirst, readTests, readTerminals, wireAnyway),
+  chain(round('break'), doFirst, readTests, doFirst, wireAnyway),
+  chain(round('break'), doFirst, readTests, doFirst, readTerminals, wireAnyway),
   chain(round('fault'), wireAnyway),
   chain(round('fault'), closeAll),
   chain(underOldPack, wireAnyway),
@@ -240,7 +249,12 @@ export const attacks: readonly Act[] = [
   decide,
   sendBack,
   remove,
-  chain(remove, wireAnyway),
+  chain(byForeman(remove), hearAll, wireAnyway),
+  chain(byForeman(remove), hearAll, wireAnyway),
+  chain(byForeman(clearEverybody), hearAll, closeAll),
+  chain(byForeman(clearEverybody), hearAll, goOn(20)),
+  chain(clear, hearAll, round('break'), goOn(40)),
+  chain(byForeman(clearEverybody), hearAll, round('fault'), goOn(40)),
   choose,
   chain(close(0), wireAnyway),
   close(0),

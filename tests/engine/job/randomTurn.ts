@@ -107,6 +107,13 @@ export class Turn {
     }
   }
 
+  /** The turn of somebody else on the job, on their own phone, who has heard everything. */
+  as(person: JobPerson): Turn {
+    const turn = new Turn(this.job, person, this.job.device(person), this.pick, this.letThrough);
+    turn.hearAll();
+    return turn;
+  }
+
   hearAll(): void {
     this.job.hear(this.device);
   }
