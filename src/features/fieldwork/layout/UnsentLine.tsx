@@ -26,7 +26,18 @@ export function UnsentLine({ saved }: { saved?: string }) {
   });
   const linked = key === 'field.unsent.attention' || key === 'field.unsent.signIn';
   return (
-    <SaveLine ticked={key !== 'field.unsent.attention'}>
+    <SaveLine
+      ticked={key !== 'field.unsent.attention'}
+      end={
+        // Signed out with nothing unsent: what others do on the job no longer comes.
+        key === 'field.unsent.none' &&
+        send.state === 'needs-sign-in' && (
+          <Link className="inline-flex min-h-14 items-center font-bold text-ink" to={paths.signIn}>
+            {t('app.signIn')}
+          </Link>
+        )
+      }
+    >
       {saved && key === 'field.unsent.none' && <>{saved} </>}
       {linked ? (
         <Link
