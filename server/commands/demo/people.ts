@@ -9,6 +9,7 @@ export const demoSites = {
     settings: {
       emergencyNumber: '112',
       musterPoint: 'Car park by the intake gate',
+      foremanPhone: '+44 1632 960 311',
       deadLimitV: 1,
       permitAsked: true,
       ferruleScheme: 'DIN 46228-4',

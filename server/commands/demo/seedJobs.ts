@@ -8,7 +8,8 @@ import type { DemoPanel } from './seedPanels';
 import { DemoJob } from './work/demoJob';
 import { newKey, type SigningKey } from './work/signingKey';
 
-const dayMs = 24 * 60 * 60 * 1000;
+const hourMs = 60 * 60 * 1000;
+const dayMs = 24 * hourMs;
 const atDate = (days: number): string => new Date(Date.now() + days * dayMs).toISOString().slice(0, 10);
 
 /** A key for each who works or countersigns, by person id. */
@@ -58,6 +59,9 @@ async function workedThrough({ services, ids, keys }: Setting, story: DemoStory,
   const pack = packs.find((each) => each.job.id === job);
   if (!pack) return;
   const startedAt = new Date(Date.now() - story.daysAgo * dayMs);
+  // Sent before it was begun, as the story goes; the server only knows now.
+  const sentAt = new Date(startedAt.getTime() - hourMs);
+  await services.database.query('UPDATE job SET sent_at = $2 WHERE id = $1', [job, sentAt]);
   const work = new DemoJob(pack, keys, startedAt, story.language);
   story.work(work, { worker: idOf(ids, worker), foreman: idOf(ids, story.foreman) });
   for (let sent = 0; sent < work.entries.length; sent += 400)

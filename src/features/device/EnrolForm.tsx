@@ -1,5 +1,5 @@
 import { useState, type SubmitEvent } from 'react';
-import { Link, useNavigate } from 'react-router-dom';
+import { Link, useLocation, useNavigate } from 'react-router-dom';
 import { useSession } from '../../api/session';
 import { paths } from '../../app/paths';
 import { fieldButtonClass } from '../../components/field/fieldButtonClass';
@@ -16,6 +16,8 @@ function SetPin({ person }: { person: SessionView['person'] }) {
   const { t } = useWords();
   const store = useDeviceStore();
   const navigate = useNavigate();
+  // Whoever was sent here from a page goes back to it.
+  const { state } = useLocation() as { state: { to?: string } | null };
   const [pin, setPin] = useState('');
   const [again, setAgain] = useState('');
   const [busy, setBusy] = useState(false);
@@ -29,7 +31,7 @@ function SetPin({ person }: { person: SessionView['person'] }) {
     try {
       await store.enrol({ id: person.id, name: person.name, email: person.email }, pin);
       setHere({ person: person.id, name: person.name });
-      await navigate(paths.myJobs);
+      await navigate(state?.to ?? paths.myJobs);
     } catch {
       setFailed(true);
       setBusy(false);

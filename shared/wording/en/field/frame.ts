@@ -8,6 +8,7 @@ export const frame = {
   'field.saveValue': '{value}. Save',
   'field.saved': 'Saved on this phone.',
   'field.more': 'More',
+  'field.picture.show': 'Show the loop',
   'field.more.jump': 'Jump to terminal',
   'field.more.left': 'Mine, left',
   'field.more.differs': 'Drawing differs',

@@ -8,6 +8,7 @@ export const frame = {
   'field.saveValue': '{value}. Guardar',
   'field.saved': 'Guardado en este teléfono.',
   'field.more': 'Más',
+  'field.picture.show': 'Mostrar el lazo',
   'field.more.jump': 'Ir a un borne',
   'field.more.left': 'Lo mío, pendiente',
   'field.more.differs': 'El plano no coincide',

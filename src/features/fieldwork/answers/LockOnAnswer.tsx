@@ -2,9 +2,10 @@ import { useState } from 'react';
 import { LineBox } from '../../../components/field/LineBox';
 import { oneLine } from '../../../components/field/oneLine';
 import { useWords } from '../../../components/words';
-import { locksOn, ownLocks } from '../job/ownLocks';
+import { ownLocks } from '../job/ownLocks';
 import { useFieldJob } from '../job/useFieldJob';
 import { useSave } from '../job/useSave';
+import { useLockElsewhere } from '../locks/useLockElsewhere';
 import { StepFrame } from '../step/StepFrame';
 import { useAnswer } from '../step/useAnswer';
 import { SaveButton } from './SaveButton';
@@ -20,7 +21,7 @@ export function LockOnAnswer({ step }: { step: StepOf<'lock-on'> }) {
   const lock = oneLine(typed);
   const { isolator } = step.ask;
   // One padlock cannot hang in two places: the number was misread, or it is another lock.
-  const elsewhere = locksOn(state).find((each) => each.lock === lock);
+  const elsewhere = useLockElsewhere(lock);
   const own = ownLocks(state, me.person).find((each) => each.isolator === isolator);
   async function keep() {
     // A number typed wrongly before comes off first: the record shows both, and the dead tests count anew.

@@ -7,18 +7,16 @@ import { Sheet } from '../../../components/field/Sheet';
 import { TagBox } from '../../../components/field/TagBox';
 import { useWords } from '../../../components/words';
 import { NotSaved } from '../job/NotSaved';
-import { locksOn } from '../job/ownLocks';
-import { useFieldJob } from '../job/useFieldJob';
+import { useLockElsewhere } from '../locks/useLockElsewhere';
 import { useSave } from '../job/useSave';
 
 /** Go to the isolator that still feeds the terminal and put the own lock on it. The red screen stays: only a reading lifts it. */
 export function LiveLock({ isolator, onClose }: { isolator: Isolator; onClose: () => void }) {
   const { t } = useWords();
-  const { state } = useFieldJob();
   const { save, saving, failed } = useSave();
   const [typed, setTyped] = useState('');
   const lock = oneLine(typed);
-  const elsewhere = locksOn(state).find((each) => each.lock === lock);
+  const elsewhere = useLockElsewhere(lock);
   async function keep() {
     if (await save('lock-on', { isolator: isolator.tag, lock })) onClose();
   }

@@ -69,10 +69,10 @@ export function LiveMeasure({ live, onBack }: { live: LiveReading; onBack: () =>
         </ActionBar>
       }
     >
-      <SignalBox signal="danger">{t('field.live.treatAsLive')}</SignalBox>
-      <h1 className="m-0 font-bold text-[1.55rem] leading-[1.25]">
+      <h1 className="m-0 text-[1.4rem] leading-[1.25] font-bold">
         <MarkedText text={marked(live.step.title)} />
       </h1>
+      <SignalBox signal="danger">{t('field.live.treatAsLive')}</SignalBox>
     </FieldPage>
   );
 }

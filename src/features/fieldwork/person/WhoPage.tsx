@@ -1,4 +1,5 @@
 import { useEffect, useState } from 'react';
+import { useLocation } from 'react-router-dom';
 import { paths } from '../../../app/paths';
 import { FieldButton, FieldLink } from '../../../components/field/FieldButton';
 import { FieldPage } from '../../../components/field/FieldPage';
@@ -42,6 +43,7 @@ function PersonList({
   onChoose: (person: DevicePerson) => void;
 }) {
   const { t } = useWords();
+  const { pathname } = useLocation();
   return (
     <>
       <h1 className="m-0 font-bold text-[1.6rem] leading-tight">
@@ -58,7 +60,7 @@ function PersonList({
         </FieldButton>
       ))}
       <p className="m-0 text-muted">{t('field.who.add')}</p>
-      <FieldLink to={paths.device} look={people.length ? 'quiet' : 'primary'}>
+      <FieldLink to={paths.device} state={{ to: pathname }} look={people.length ? 'quiet' : 'primary'}>
         {t('field.who.setUp')}
       </FieldLink>
       <p className="m-0 text-[0.95rem]">{t('field.safetyPosition')}</p>
