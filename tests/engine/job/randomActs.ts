@@ -154,6 +154,33 @@ const underOldPack: Act = (turn) => {
   turn.answerWell(step);
   turn.change({ pack: `${packDigest.slice(1)}0` });
 };
+const testsUnderOldPack: Act = (turn) => {
+  for (const step of turn.steps.filter(isTest)) {
+    turn.answerWell(step);
+    turn.change({ pack: `${packDigest.slice(1)}0` });
+  }
+};
+/** A lock-off of a padlock that is somebody else's. */
+const unlockAnother: Act = (turn) => {
+  for (const { body } of turn.held().filter(({ kind }) => kind === 'lock-on'))
+    turn.write('lock-off', { isolator: String(body['isolator']), lock: String(body['lock']) });
+};
+/** Two who do not hear each other find different things; the foreman believes the better. */
+const chooseBetter: Act = (turn) => {
+  const step = turn.pickStep(
+    ({ stage, by, ask }) => stage === 'isolate' && by === 'one' && ask.kind === 'choice',
+  );
+  const { people } = turn.job.facts;
+  const other = people.find(({ id, part }) => id !== turn.person.id && part === 'electrician');
+  const foreman = people.find(({ part }) => part === 'foreman');
+  if (!step || !other || !foreman) return;
+  const elsewhere = turn.as(other);
+  turn.hearAll();
+  const good = turn.answerWell(step);
+  elsewhere.answer(step, { kind: 'choice', value: 'no' });
+  turn.as(foreman).write('chosen', { step: step.id, entry: good.id, words: 'It holds' });
+  turn.hearAll();
+};
 const signAsOpen: Act = ({ job, person }) => {
   try {
     sign(job, person);
@@ -240,6 +267,10 @@ export const attacks: readonly Act[] = [
   chain(round('fault'), wireAnyway),
   chain(round('fault'), closeAll),
   chain(underOldPack, wireAnyway),
+  chain(testsUnderOldPack, wireAnyway),
+  chain(hearAll, unlockAnother, closeAll),
+  chain(chooseBetter, wireAnyway),
+  chain(othersNumber, wireAnyway),
   chain(
     hold(({ stage }) => stage === 'isolate' || stage === 'prove-dead'),
     wireAnyway,
@@ -249,8 +280,10 @@ export const attacks: readonly Act[] = [
   decide,
   sendBack,
   remove,
-  chain(byForeman(remove), hearAll, wireAnyway),
-  chain(byForeman(remove), hearAll, wireAnyway),
+  chain(readTerminals, byForeman(remove), hearAll, wireAnyway),
+  chain(readTerminals, byForeman(remove), hearAll, readTerminals, wireAnyway),
+  chain(hearAll, byForeman(clearEverybody), hearAll, closeAll),
+  chain(hearAll, unlockAll, byForeman(clearEverybody), hearAll, closeAll),
   chain(byForeman(clearEverybody), hearAll, closeAll),
   chain(byForeman(clearEverybody), hearAll, goOn(20)),
   chain(clear, hearAll, round('break'), goOn(40)),

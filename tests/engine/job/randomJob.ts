@@ -30,7 +30,11 @@ export function startAt(checklist: Checklist, crew: number, until: Stage): Job {
   job.write(mara, 'accepted', {});
   for (let before = -1; before !== job.entries.length;) {
     before = job.entries.length;
-    for (const person of electricians.slice(0, crew)) walk(job, person, until);
+    for (const person of electricians.slice(0, crew))
+      walk(job, person, until, () => {
+        if (job.entries.length > 1000) throw new Error(`nobody comes to ${until}`);
+        return false;
+      });
   }
   return job;
 }
