@@ -3,13 +3,9 @@ import type { Placed } from '../order/placed';
 import { unprovedIn } from './provedParts';
 import { isAfterAll } from './frontier';
 import { ownLock } from './locks';
+import { ownNewest } from './ownNewest';
 import { isolationOver, reopenersOf } from './rounds';
 import type { Answered, Lock, PanelProof, View } from './view';
-
-export function ownNewest(view: View, step: number, person: string): readonly Answered[] {
-  const answers = view.own[step] ?? view.answers[step] ?? [];
-  return answers.filter((each) => each.person === person);
-}
 
 /** A tester that failed on the known voltage takes every reading of its part before with it. */
 function testerFailures(view: View, step: number, person: string): Placed[] {

@@ -1,7 +1,7 @@
 /** A reading counts between two proofs of the tester: before it and after it, half an hour apart at most. */
 import { before } from '../order/placed';
 import type { ProvedPart } from '../known/lookup';
-import { ownNewest } from './proof';
+import { ownNewest } from './ownNewest';
 import type { Answered, View } from './view';
 
 // isolation.md §3: the same person and instrument, at most 30 minutes a part.

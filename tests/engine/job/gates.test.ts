@@ -1,78 +1,31 @@
 import { beforeAll, describe, expect, test } from 'vitest';
-import { generateChecklist } from '../../../shared/checklist/generate';
-import { gateFor } from '../../../shared/job/gates';
 import { nextStep } from '../../../shared/job/next';
-import type { JobPerson } from '../../../shared/job/types';
+import {
+  checklist,
+  stepOf,
+  codes,
+  upTo,
+  off,
+  read,
+  proveAfter,
+  prepare,
+  terminals,
+  land,
+  deadTest,
+  hold,
+  reachLand,
+} from '../../support/gateJobs';
 import {
   answerBody,
   answerWell,
-  goodValue,
   idOf,
   ilya,
-  lockNumber,
   mara,
   newJob,
-  people,
-  plainJob,
   sayClear,
   tomas,
   type Job,
 } from '../../support/jobScenario';
-import { exampleInput } from '../../support/smallPanel';
-
-const checklist = generateChecklist({ ...exampleInput(), scope: ['DI3.02', 'DO4.01'] });
-const stepOf = (id: string) => {
-  const step = checklist.steps.find((each) => each.id === id);
-  if (!step) throw new Error(`no step ${id}`);
-  return step;
-};
-const codes = (job: Job, person: JobPerson, step: string): string[] => {
-  const gate = gateFor(checklist, job.state(), person.id, step);
-  return gate.open ? [] : gate.refusals.map(({ code }) => code);
-};
-
-/** Written down in order by one electrician, up to the first step whose id begins so. */
-function upTo(prefix: string, on: JobPerson[] = people): Job {
-  const job = newJob(checklist, on);
-  job.write(mara, 'accepted', {});
-  const end = checklist.steps.findIndex(({ id }) => id.startsWith(prefix));
-  for (const step of checklist.steps.slice(0, end)) answerWell(job, mara, step);
-  return job;
-}
-const answer = (job: Job, person: JobPerson, id: string) => answerWell(job, person, stepOf(id));
-const off = (job: Job, person: JobPerson, isolator: string) =>
-  job.write(person, 'lock-off', { isolator, lock: lockNumber(person, isolator) });
-const read = (job: Job, id: string, value: number) =>
-  job.write(mara, 'answer', answerBody(stepOf(id), { kind: 'reading', value }));
-
-/** Proves the tester once more after the part of the first dead test. */
-const proveAfter = (job: Job) =>
-  checklist.steps
-    .filter(({ id, part }) => id.includes('.tester.after') && part === stepOf(deadTest).part)
-    .filter(({ stage }) => stage === 'prove-dead')
-    .map((step) => answerWell(job, mara, step));
-
-/** Everything that a person answers alone before a step. */
-function prepare(job: Job, person: JobPerson, before: string): void {
-  const end = checklist.steps.findIndex(({ id }) => id === before);
-  for (const step of checklist.steps.slice(0, end))
-    if (step.by === 'each' && step.ask.kind !== 'lock-off' && step.stage !== 'sign')
-      answerWell(job, person, step);
-}
-
-const terminals = checklist.steps.filter(({ personal, where }) => personal && where?.point === 'DI3.02');
-const land = 'wire.DI3.02.land.signal';
-const deadTest = 'dead.S24.+-0 V.ac';
-const hold = (job: Job, step: string) =>
-  job.write(mara, 'hold', { step, reason: 'not-safe', words: 'Not safe' });
-
-const reachLand = () => {
-  const job = upTo('wire.');
-  for (const step of checklist.steps.filter(({ id }) => id.startsWith('wire.group.G3')))
-    answerWell(job, mara, step);
-  for (const step of terminals) answerWell(job, mara, step);
-  return job;
-};
 
 /** Each row does something to a job that stands at landing a wire, and names what then stands against it. */
 const wiring: [name: string, act: (job: Job) => unknown, codes: string[]][] = [
@@ -357,52 +310,5 @@ describe('the order of stages', () => {
     expect(codes(job, mara, 'no.such.step')).toEqual(['unknown-step']);
     job.facts.cancelled = true;
     expect(codes(job, mara, 'ready.panel')).toEqual(['cancelled']);
-  });
-});
-
-describe('two answers', () => {
-  const concurrent = (id: string, values: [number | string, number | string]) => {
-    const job = id.startsWith('prove') ? plainJob(checklist, people) : reachLand();
-    if (id.startsWith('prove'))
-      for (const each of ['ready', 'prove.rule'])
-        for (const step of checklist.steps.filter((one) => one.by === 'each' && one.id.startsWith(each)))
-          answerWell(job, ilya, step);
-    else prepare(job, ilya, id);
-    for (const each of [mara, ilya]) job.hear(job.device(each));
-    const step = stepOf(id);
-    const value = (given: number | string) =>
-      typeof given === 'number'
-        ? ({ kind: 'reading', value: given } as const)
-        : ({ kind: 'choice', value: given } as const);
-    const entries = [mara, ilya].map((person, index) =>
-      job.writeDeaf(job.device(person), 'answer', answerBody(step, value(values[index] ?? 0))),
-    );
-    return { job, entries };
-  };
-
-  test('the same answer twice is one', () => {
-    const { job } = concurrent('prove.DI3.02.on', ['light-and-bit-on', 'light-and-bit-on']);
-    expect(job.state().steps['prove.DI3.02.on']?.status).toBe('done');
-  });
-
-  test('elsewhere than in proving dead the foreman chooses, having seen both', () => {
-    const { job, entries } = concurrent('prove.DI3.02.on', ['light-and-bit-on', 'light-or-bit-off']);
-    expect(job.state().steps['prove.DI3.02.on']?.status).toBe('two-answers');
-    job.write(mara, 'chosen', { step: 'prove.DI3.02.on', entry: entries[0]?.id ?? '', words: 'Mine' });
-    expect(job.state().steps['prove.DI3.02.on']?.status).toBe('two-answers');
-    job.write(tomas, 'chosen', { step: 'prove.DI3.02.on', entry: entries[1]?.id ?? '', words: 'I saw it' });
-    expect(job.state().steps['prove.DI3.02.on']?.status).toBe('out');
-    expect(job.state().tookPart).not.toContain(tomas.id);
-  });
-
-  test('in isolating the worse counts, and nobody may choose', () => {
-    const { job, entries } = concurrent('isolate.Q1.try', ['handle-holds', 'handle-moves']);
-    expect(job.state().steps['isolate.Q1.try']?.status).toBe('out');
-    job.write(tomas, 'chosen', { step: 'isolate.Q1.try', entry: entries[0]?.id ?? '', words: 'It holds' });
-    expect(job.state().steps['isolate.Q1.try']?.status).toBe('out');
-    expect(codes(job, mara, land)).toContain('order');
-    answer(job, mara, 'isolate.Q1.try');
-    expect(job.state().steps['isolate.Q1.try']?.status).toBe('done');
-    expect(goodValue(stepOf('isolate.Q1.try').ask)).toEqual({ kind: 'choice', value: 'handle-holds' });
   });
 });

@@ -2,7 +2,8 @@ export const person = {
   'field.who.sheet': 'Who is here?',
   'field.who.title': 'Who are you?',
   'field.who.nobody': 'Nobody is set up on this device yet',
-  'field.who.add': 'Answering, signing and deciding need your own PIN on this device. Setting it needs the network once.',
+  'field.who.add':
+    'Answering, signing and deciding need your own PIN on this device. Setting it needs the network once.',
   'field.who.setUp': 'Set up this phone for me',
   'field.who.other': 'I am somebody else',
   'field.who.leave': 'Hand the phone over',

@@ -2,7 +2,8 @@ export const person = {
   'field.who.sheet': '¿Quién está aquí?',
   'field.who.title': '¿Quién es usted?',
   'field.who.nobody': 'Aún no hay nadie dado de alta en este aparato',
-  'field.who.add': 'Responder, firmar y decidir piden su propio PIN en este aparato. Fijarlo necesita la red una vez.',
+  'field.who.add':
+    'Responder, firmar y decidir piden su propio PIN en este aparato. Fijarlo necesita la red una vez.',
   'field.who.setUp': 'Darme de alta en este teléfono',
   'field.who.other': 'Soy otra persona',
   'field.who.leave': 'Pasar el teléfono a otra persona',
