@@ -31,6 +31,8 @@ export const device = {
   'device.enrol.short': 'Use {n} digits or more.',
   'device.enrol.differs': 'The two PINs differ.',
   'device.enrol.failed': 'The PIN was not set. Setting it needs the network. Try again.',
+  'device.enrol.other':
+    '{name} is signed in here and has a PIN. Somebody else? {name} signs out first, then you sign in.',
   'device.enrol.save': 'Set the PIN',
   'device.enrol.signIn': 'Sign in to set a PIN on this device.',
   'device.enrol.noNetwork': 'Setting a PIN needs the network, and no server answers now.',

@@ -31,6 +31,8 @@ export const device = {
   'device.enrol.short': 'Use {n} cifras o más.',
   'device.enrol.differs': 'Los dos PIN son distintos.',
   'device.enrol.failed': 'No se fijó el PIN. Hace falta la red. Pruebe otra vez.',
+  'device.enrol.other':
+    '{name} tiene la sesión abierta aquí y tiene PIN. ¿Otra persona? Primero {name} cierra la sesión; después entra usted.',
   'device.enrol.save': 'Fijar el PIN',
   'device.enrol.signIn': 'Entre para fijar un PIN en este dispositivo.',
   'device.enrol.noNetwork': 'Para fijar un PIN hace falta la red y ahora no responde el servidor.',

@@ -72,7 +72,8 @@ export function EnrolForm({ enrolled }: { enrolled: DevicePerson[] }) {
   const { t } = useWords();
   const session = useSession();
   const person = session.data?.person;
-  if (person && enrolled.some((each) => each.person === person.id)) return null;
+  if (person && enrolled.some((each) => each.person === person.id))
+    return <p className="m-0">{t('device.enrol.other', { name: person.name })}</p>;
   if (person) return <SetPin person={person} />;
   return (
     <>
