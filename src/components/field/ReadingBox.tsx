@@ -36,7 +36,7 @@ export function ReadingBox({
     field.current?.setAttribute('virtualkeyboardpolicy', 'manual');
   }, []);
   return (
-    <div className="flex items-center border-[3px] border-ink bg-sheet px-3.5">
+    <div className="flex items-center border-[3px] border-ink bg-sheet px-3.5 has-[input:focus-visible]:outline-3 has-[input:focus-visible]:outline-offset-2 has-[input:focus-visible]:outline-ink">
       {minus && (
         <button
           type="button"
@@ -66,7 +66,7 @@ export function ReadingBox({
           event.preventDefault();
           onChange(padPress(value, key));
         }}
-        className="min-h-[3.5rem] w-full min-w-0 border-0 bg-transparent p-0 font-mono text-[2.4rem] leading-none font-semibold text-ink focus-visible:outline-offset-4"
+        className="min-h-[3.5rem] w-full min-w-0 border-0 bg-transparent p-0 font-mono text-[2.4rem] leading-none font-semibold text-ink outline-none"
       />
       <span className="shrink-0 pl-3 text-[1.2rem]">{unit}</span>
     </div>
