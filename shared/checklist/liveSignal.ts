@@ -10,7 +10,7 @@ export const isDangerous = (V: number, kind: 'dc' | 'ac1' | 'ac3' | undefined): 
 // The file format allows a tolerance of +100 % at most: what an unstated one has to be taken for.
 const unstatedMaxPct = 100;
 
-/** The label alone says nothing: a circuit called SELV that carries more volts than touch bears is as live as any. */
+/** The label alone says nothing: a circuit called SELV that carries more volts than touch bears is as live as the rest. */
 const isHarmless = ({ extraLow, kind, V, tolerance }: Supply): boolean =>
   extraLow !== 'none' && !isDangerous(V * (1 + (tolerance?.maxPct ?? unstatedMaxPct) / 100), kind);
 

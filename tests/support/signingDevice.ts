@@ -2,7 +2,7 @@
 import { createHash } from 'node:crypto';
 import { v7 } from 'uuid';
 import type { Entry } from '../../shared/job/entry';
-import { newKey, signed, type SigningKey } from '../../server/commands/demo/work/signingKey';
+import { newKey, signed, type SigningKey } from '../../server/commands/demo/played/signingKey';
 import { entryHash } from '../../shared/job/entryBytes';
 import { logId } from '../../shared/job/logId';
 import type { Agent } from './seedPeople';

@@ -5,8 +5,8 @@ import { demoActor, idOf, type DemoIds } from './demoActor';
 import { demoPeople } from './people';
 import { demoStories, type DemoStory } from './stories';
 import type { DemoPanel } from './seedPanels';
-import { DemoJob } from './work/demoJob';
-import { newKey, type SigningKey } from './work/signingKey';
+import { DemoJob } from './played/demoJob';
+import { newKey, type SigningKey } from './played/signingKey';
 
 const hourMs = 60 * 60 * 1000;
 const dayMs = 24 * hourMs;

@@ -3,7 +3,7 @@ import type { Language } from '../../../shared/api/common';
 import type { Step } from '../../../shared/checklist/types';
 import { mixedScope } from './panels/mixed';
 import type { DemoPanel } from './seedPanels';
-import type { DemoJob, Otherwise } from './work/demoJob';
+import type { DemoJob, Otherwise } from './played/demoJob';
 
 interface Crew {
   worker: string;
