@@ -121,7 +121,8 @@ describe('bleeder', () => {
           if (made) {
             expect(left(made.ohm)).toBeLessThanOrEqual(offV * (1 + 1e-9));
             expect(left(made.atMostOhm)).toBeCloseTo(offV, 5);
-            expect(left(made.atMostOhm * 1.01)).toBeGreaterThan(offV);
+            // A resistor a million times the input's leads nothing away that doubles can show.
+            if (made.atMostOhm < 1e6 * ohm) expect(left(made.atMostOhm * 1.01)).toBeGreaterThan(offV);
           } else expect(left(Infinity)).toBeLessThanOrEqual(offV * (1 + 1e-9));
         },
       ),
