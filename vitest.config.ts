@@ -6,7 +6,13 @@ export default defineConfig({
   test: {
     projects: [
       {
-        test: { ...node, name: 'engine', include: ['tests/engine/**/*.test.{ts,tsx}'], testTimeout: 60_000 },
+        test: {
+          ...node,
+          name: 'engine',
+          include: ['tests/engine/**/*.test.{ts,tsx}'],
+          setupFiles: 'tests/support/fastCheckSeed.ts',
+          testTimeout: 60_000,
+        },
       },
       {
         test: {
