@@ -263,7 +263,7 @@ describe('the main job', () => {
     const page = await deskAs(officer);
     await page.goto(`${paths.records}?panel=${mixedPanel.tag}`);
     await page.getByRole('link', { name: '1', exact: true }).click();
-    await page.getByRole('heading', { level: 1 }).waitFor();
+    await page.waitForURL((url) => url.pathname.startsWith(`${paths.records}/`));
     const id = /\/records\/(.+)$/.exec(new URL(page.url()).pathname)?.[1] ?? '';
     const file = join(mkdtempSync(join(tmpdir(), 'coldloop-pdf-')), 'record.pdf');
     const pdf = await page.evaluate(async (url) => {

@@ -31,6 +31,11 @@ export function setHere(here: Here | null): void {
   });
 }
 
+/** Somebody signs in: unless they are who is here, their own PIN is asked for. */
+export function leaveUnless(person: string): void {
+  if (read()?.person !== person) setHere(null);
+}
+
 export function useHere(): Here | null {
   return useSyncExternalStore((listener) => {
     listeners.add(listener);

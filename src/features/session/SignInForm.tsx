@@ -5,7 +5,7 @@ import { z } from 'zod';
 import { paths } from '../../app/paths';
 import { useSignIn } from '../../api/session';
 import { Button } from '../../components/Button';
-import { setHere } from '../../components/field/here';
+import { leaveUnless } from '../../components/field/here';
 import { TextField } from '../../components/form/TextField';
 import { useErrorWords } from '../../components/form/useErrorWords';
 import { ProblemMessage } from '../../components/ProblemMessage';
@@ -30,7 +30,9 @@ export function SignInForm({ done }: { done: string | null }) {
   return (
     <form
       noValidate
-      onSubmit={form.handleSubmit((values) => signIn.mutate(values, { onSuccess: () => setHere(null) }))}
+      onSubmit={form.handleSubmit((values) =>
+        signIn.mutate(values, { onSuccess: ({ person }) => leaveUnless(person.id) }),
+      )}
     >
       {done === 'password' && <p role="status">{t('app.reset.done')}</p>}
       {done === 'invitation' && <p role="status">{t('app.invitation.done')}</p>}
