@@ -188,7 +188,7 @@ describe('rough handling at the desk', () => {
     const engineer = await as('nora');
     await engineer.goto(paths.panels);
     await engineer.getByRole('link', { name: panel.tag }).first().click();
-    await engineer.getByRole('heading', { level: 1 }).waitFor();
+    await engineer.waitForURL((url) => url.pathname.startsWith(`${paths.panels}/`));
     await choose(engineer, 'PLC9.panel.json', renamed('Renamed third'));
     await engineer.getByRole('heading', { level: 1, name: /Renamed third/ }).waitFor();
     await issueRevision(engineer);
