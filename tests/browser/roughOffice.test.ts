@@ -165,7 +165,7 @@ describe('rough handling at the desk', () => {
     const second = await page.context().newPage();
     for (const each of [page, second]) {
       await each.goto(path);
-      await each.waitForURL((url) => url.pathname.startsWith(`${paths.panels}/`));
+      await each.getByRole('heading', { level: 1, name: panel.tag }).waitFor();
     }
     // The second window's person still looks at the draft they opened.
     await second.route('**/api/panels/*', (route) =>
