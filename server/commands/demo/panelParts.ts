@@ -248,3 +248,22 @@ export function outputPoint(
 }
 
 export const onDc = { role: 'minus', colour: 'BU', signal: 'BU' } as const;
+
+/** The usual 24 V of a panel: made from its 230 V behind F1, earthed at 0 V. */
+export const fieldSupply24: Supply = {
+  tag: 'S24',
+  description: '24 V DC field supply',
+  kind: 'dc',
+  purpose: 'field',
+  V: 24,
+  tolerance: regulated,
+  earthed: true,
+  earthFaultMonitor: false,
+  terminals: { plus: 'X1:3', minus: 'X1:4' },
+  feeds: [{ from: 'S230', through: ['F1'] }],
+  ratedA: 10,
+  otherLoadA: 0.5,
+  protectionA: 4,
+  bulk: { uF: 2200, bleedOhm: 1000 },
+  extraLow: 'PELV',
+};

@@ -16,7 +16,7 @@ import { NaivePast, type Verdict } from './naivePast';
 import { actCount, crews, play, startAt, workerCount, type Move } from './randomJob';
 import { tinyChecklist } from './tinyChecklist';
 
-// Numbers of runs and the seed can be given, for a longer look: RUNS=5000 SEED=7.
+// More runs or another seed for a longer look: RUNS=5000 SEED=7.
 const runs = Number(process.env['RUNS'] ?? 200);
 const seed = Number(process.env['SEED'] ?? 20261130);
 const assertFor = <T>(count: number, property: fc.IPropertyWithHooks<T>) => {

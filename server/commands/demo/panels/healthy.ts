@@ -15,9 +15,9 @@ import {
   output24,
   outputPoint,
   pnp,
-  regulated,
   terminalRange,
   twoWire,
+  fieldSupply24,
 } from '../panelParts';
 
 const gallery = 'Filter gallery, basement';
@@ -132,23 +132,7 @@ export const healthyPanel: Panel = {
       bulk: 'none',
       extraLow: 'none',
     },
-    {
-      tag: 'S24',
-      description: '24 V DC field supply',
-      kind: 'dc',
-      purpose: 'field',
-      V: 24,
-      tolerance: regulated,
-      earthed: true,
-      earthFaultMonitor: false,
-      terminals: { plus: 'X1:3', minus: 'X1:4' },
-      feeds: [{ from: 'S230', through: ['F1'] }],
-      ratedA: 10,
-      otherLoadA: 0.5,
-      protectionA: 4,
-      bulk: { uF: 2200, bleedOhm: 1000 },
-      extraLow: 'PELV',
-    },
+    fieldSupply24,
   ],
   modules: [
     {

@@ -1,9 +1,6 @@
 /** Where the poles of a supply are met, seen from a group's common. */
+import { supplyTerminals } from '../../../isolation/supplyTerminals';
 import type { Group, Supply } from '../../../panel/panelSchema';
-
-/** Every terminal at which a supply is measured. */
-export const polesOf = (supply: Supply): string[] =>
-  Object.values<string | undefined>(supply.terminals).filter((terminal) => terminal !== undefined);
 
 /** The terminal of the pole that the group's common is wired to; undefined where the panel file does not tell. */
 function commonPole({ common, phase }: Group, { terminals }: Supply): string | undefined {
@@ -22,5 +19,5 @@ export function otherPoles(group: Group, supply: Supply): string[] {
   const own = commonPole(group, supply);
   const { terminals } = supply;
   if (group.common !== 'neutral' && 'N' in terminals && terminals.N !== undefined) return [terminals.N];
-  return polesOf(supply).filter((terminal) => terminal !== own);
+  return supplyTerminals(supply).filter((terminal) => terminal !== own);
 }

@@ -8,7 +8,8 @@ import { makeStep } from '../../makeStep';
 import { naturalCompare } from '../../naturalCompare';
 import type { Step } from '../../types';
 import { conductorsOf, type Conductor } from './conductorsOf';
-import { otherPoles, polesOf } from './poles';
+import { supplyTerminals } from '../../../isolation/supplyTerminals';
+import { otherPoles } from './poles';
 
 const atEarth: ReadonlySet<string> = new Set(['earth', 'screen']);
 
@@ -22,12 +23,12 @@ interface Against {
 type Pole = Omit<Against, 'name'>;
 
 const everyPole = (supply: Supply): Pole[] =>
-  polesOf(supply).map((second) => ({ second, supply: supply.tag, proves: true }));
+  supplyTerminals(supply).map((second) => ({ second, supply: supply.tag, proves: true }));
 
 /** The group's other pole, where the isolation engine asks nothing of that supply at this terminal. */
 function ownPoles({ group, supply }: PointFacts, tested: readonly Pole[]): Pole[] {
   if (!supply) return [];
-  const poles = polesOf(supply);
+  const poles = supplyTerminals(supply);
   if (tested.some(({ second }) => poles.includes(second))) return [];
   return otherPoles(group, supply).map((second) => ({ second, supply: supply.tag, proves: true }));
 }
